@@ -1,3 +1,5 @@
+import { isNativeError } from 'node:util/types';
+
 // Classes and codes of https://www.postgresql.org/docs/15/errcodes-appendix.html: 08 connection,
 // 57P01–57P03 shutting down or starting, 53300 too many connections; the rest are Node's.
 const AWAY =
@@ -8,8 +10,9 @@ const NAMES = ['CannotExecuteNotConnectedError', 'ConnectionIsNotSetError'];
 
 /** Whether an error means that PostgreSQL cannot be reached, and not that a query is wrong. */
 export function isDatabaseAway(error: unknown): boolean {
-  if (error instanceof AggregateError) return error.errors.some(isDatabaseAway);
-  if (!(error instanceof Error)) return false;
+  if (!isNativeError(error)) return false;
+  // a name with two addresses, both refused
+  if ('errors' in error && Array.isArray(error.errors)) return error.errors.some(isDatabaseAway);
   if ('code' in error && typeof error.code === 'string') return AWAY.test(error.code);
   return WORDS.test(error.message) || NAMES.includes(error.name);
 }
