@@ -1,53 +1,40 @@
 import { isAlive, SELF } from './process-identity.mjs';
-import { APP, OWNER, SUPERUSER, useCluster } from './postgres.mjs';
+import { APP, joinCluster, OWNER, SUPERUSER } from './postgres.mjs';
+import { onShutdown } from './shutdown.mjs';
 
-const TEST_PREFIX = 'run_';
+const RUN_PREFIX = 'run_';
 
 /**
  * The database that `npm start` and `npm run dev` serve from; it keeps what is in it.
- * @returns DATABASE_URL and MIGRATION_DATABASE_URL, and `release`
+ * @returns DATABASE_URL (the server's role) and MIGRATION_DATABASE_URL (the tables' owner)
  */
-export async function useDatabase() {
-  const cluster = await useCluster('postgres', 54_400);
-  return orRelease(cluster, async () => {
-    await asSuperuser(cluster, async (query) => {
-      await prepareRoles(cluster, query);
-      await createMissing(query, 'matside');
-    });
-    return { env: urls(cluster, 'matside'), release: cluster.release };
+export async function openDatabase() {
+  const cluster = await joinCluster('postgres', 54_400);
+  await asSuperuser(cluster, async (query) => {
+    await prepareRoles(cluster, query);
+    await createMissing(query, 'matside');
   });
+  return urls(cluster, 'matside');
 }
 
-/** An empty database for one run of tests, in the tests' own cluster; dropped by `release`. */
-export async function useTestDatabase() {
-  const cluster = await useCluster('postgres-test', 54_500);
-  const name = `${TEST_PREFIX}${SELF.replace('-', '_')}`;
-  return orRelease(cluster, async () => {
-    await asSuperuser(cluster, async (query) => {
-      await prepareRoles(cluster, query);
-      await dropAbandoned(query);
-      await createMissing(query, name);
-    });
-    const release = async () => {
-      await asSuperuser(cluster, (query) => query(`DROP DATABASE ${name} WITH (FORCE)`));
-      await cluster.release();
-    };
-    return { env: urls(cluster, name), release };
+/** An empty database for one run of tests, in the tests' own cluster; dropped at shutdown. */
+export async function openRunDatabase() {
+  const cluster = await joinCluster('postgres-test', 54_500);
+  const name = `${RUN_PREFIX}${SELF.replace('-', '_')}`;
+  const drop = `DROP DATABASE IF EXISTS ${name} WITH (FORCE)`;
+  onShutdown(() => asSuperuser(cluster, (query) => query(drop)));
+  await asSuperuser(cluster, async (query) => {
+    await prepareRoles(cluster, query);
+    await dropAbandoned(query);
+    await createMissing(query, name);
   });
-}
-
-async function orRelease(cluster, job) {
-  try {
-    return await job();
-  } catch (error) {
-    await cluster.release();
-    throw error;
-  }
+  return urls(cluster, name);
 }
 
 async function asSuperuser(cluster, job) {
   const { default: pg } = await import('pg'); // not there before npm ci
   const client = new pg.Client(urlOf(cluster, SUPERUSER, 'postgres'));
+  client.on('error', () => undefined); // the cluster may be stopped under us
   await client.connect();
   try {
     return await job(async (sql) => (await client.query(sql)).rows);
@@ -75,8 +62,8 @@ async function createMissing(query, name) {
 /** Databases of runs that were killed before they could drop them. */
 async function dropAbandoned(query) {
   for (const { datname } of await query('SELECT datname FROM pg_database')) {
-    if (!datname.startsWith(TEST_PREFIX)) continue;
-    const identity = datname.slice(TEST_PREFIX.length).replace('_', '-');
+    if (!datname.startsWith(RUN_PREFIX)) continue;
+    const identity = datname.slice(RUN_PREFIX.length).replace('_', '-');
     if (!isAlive(identity)) await query(`DROP DATABASE IF EXISTS ${datname} WITH (FORCE)`);
   }
 }

@@ -4,6 +4,8 @@ import { setTimeout as sleep } from 'node:timers/promises';
 
 import { isAlive, SELF } from './process-identity.mjs';
 
+const OURS = Symbol('ours');
+
 /**
  * Runs `job` while no other process holds the lock file. A lock whose holder has died is taken
  * over. `onWait` is called once with the holder's process id if there is a wait.
@@ -12,7 +14,7 @@ export async function withLock(file, job, onWait = () => undefined) {
   mkdirSync(path.dirname(file), { recursive: true });
   for (let waited = false; ; waited = true) {
     const holder = tryLock(file);
-    if (holder === SELF) break;
+    if (holder === OURS) break;
     if (!waited && holder) onWait(holder.split('-')[0]);
     await sleep(100);
   }
@@ -23,13 +25,13 @@ export async function withLock(file, job, onWait = () => undefined) {
   }
 }
 
-/** @returns the identity that holds the lock now: our own if we got it, `null` if it just moved */
+/** @returns OURS if we got it, else the identity that holds it, `null` if that just changed */
 function tryLock(file) {
   const mine = `${file}.${SELF}`;
   writeFileSync(mine, SELF);
   try {
     linkSync(mine, file); // made whole or not at all, and fails when there is one
-    return SELF;
+    return OURS;
   } catch (error) {
     if (error.code !== 'EEXIST') throw error;
     return removeIfDead(file);

@@ -1,35 +1,41 @@
 import { existsSync, readdirSync } from 'node:fs';
 import path from 'node:path';
 
-import { CACHE } from './paths.mjs';
-import { SetupError } from './say.mjs';
+import { bring, UNPACKED, unpackedEnv } from './debian.mjs';
+import { run } from './run.mjs';
 
 const OLDEST = 15;
-const UNPACKED = path.join(CACHE, 'debian');
 
 /**
- * The newest PostgreSQL, 15 or later: the system's, or the one unpacked into the project.
- * @returns where its programs lie and the environment they need, or `null`
+ * The newest PostgreSQL, 15 or later: the system's, the one unpacked into the project, or else
+ * brought from Debian. MATSIDE_POSTGRES_HOME stands in for /usr/lib/postgresql.
+ * @returns `path(program)` and the environment that the programs need
  */
-export function lookForPostgres() {
+export function bringPostgres() {
+  return bring({ name: 'postgresql', look, choose });
+}
+
+function look() {
   const system = process.env.MATSIDE_POSTGRES_HOME ?? '/usr/lib/postgresql';
   return newest(system, {}) ?? newest(path.join(UNPACKED, 'usr/lib/postgresql'), unpackedEnv());
 }
 
-export async function findPostgres() {
-  const found = lookForPostgres();
-  if (!found) throw new SetupError('PostgreSQL 15 or newer is missing.');
-  return found;
-}
-
 function newest(home, env) {
   if (!existsSync(home)) return null;
-  const versions = readdirSync(home)
+  const version = readdirSync(home)
     .map(Number)
-    .filter((version) => version >= OLDEST)
-    .filter((version) => existsSync(path.join(home, `${version}/bin/initdb`)))
-    .sort((a, b) => b - a);
-  if (versions.length === 0) return null;
-  const bin = path.join(home, `${versions[0]}/bin`);
-  return { version: versions[0], env, path: (program) => path.join(bin, program) };
+    .filter((it) => it >= OLDEST && existsSync(path.join(home, `${it}/bin/initdb`)))
+    .sort((a, b) => b - a)[0];
+  if (!version) return null;
+  return { env, path: (program) => path.join(home, `${version}/bin`, program) };
+}
+
+/** Debian has one PostgreSQL a release: postgresql-15 in 12, postgresql-17 in 13. */
+async function choose(aptOptions) {
+  const { text } = await run('apt-cache', [...aptOptions, 'pkgnames', 'postgresql-'], {
+    mayFail: true,
+  });
+  const versions = [...text.matchAll(/^postgresql-(\d+)$/gm)].map(([, version]) => Number(version));
+  const version = versions.filter((it) => it >= OLDEST).sort((a, b) => b - a)[0];
+  return version ? `postgresql-${version}` : null;
 }

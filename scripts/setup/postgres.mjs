@@ -6,10 +6,11 @@ import { livingLeases, releaseLease, takeLease } from './leases.mjs';
 import { withLock } from './lock.mjs';
 import { DATA } from './paths.mjs';
 import { findFreePort } from './ports.mjs';
-import { findPostgres } from './postgres-programs.mjs';
+import { bringPostgres } from './postgres-programs.mjs';
 import { canEnter, postgresUser } from './run-as.mjs';
 import { run } from './run.mjs';
 import { say, SetupError } from './say.mjs';
+import { onShutdown } from './shutdown.mjs';
 
 export const SUPERUSER = 'matside_superuser';
 /** Owns the tables and migrates them. */
@@ -29,27 +30,22 @@ fsync = on
 
 /**
  * Starts the project's own PostgreSQL cluster of that name, or joins it when it runs already.
- * The last process that uses it stops it.
+ * At the shutdown of the last process that uses it, it stops.
  *
  * @param name folder under .data: "postgres", or "postgres-test" for tests
  * @param firstPort where the search for a free port begins
- * @returns the port, the passwords by role, and `release`
+ * @returns the port, and the passwords by role
  */
-export async function useCluster(name, firstPort) {
+export async function joinCluster(name, firstPort) {
   const cluster = await locate(name);
   const lock = path.join(cluster.folder, 'lock');
   const users = path.join(cluster.folder, 'users');
+  onShutdown(() => leave(cluster, lock, users));
   return withLock(lock, async () => {
     takeLease(users);
-    try {
-      if (!existsSync(path.join(cluster.data, 'PG_VERSION'))) await create(cluster);
-      const port = (await isRunning(cluster)) ? portOf(cluster) : await start(cluster, firstPort);
-      const passwords = JSON.parse(readFileSync(cluster.passwordFile, 'utf8'));
-      return { port, passwords, release: () => leave(cluster, lock, users) };
-    } catch (error) {
-      releaseLease(users);
-      throw error;
-    }
+    if (!existsSync(path.join(cluster.data, 'PG_VERSION'))) await create(cluster);
+    const port = (await isRunning(cluster)) ? portOf(cluster) : await start(cluster, firstPort);
+    return { port, passwords: JSON.parse(readFileSync(cluster.passwordFile, 'utf8')) };
   });
 }
 
@@ -58,7 +54,7 @@ function leave(cluster, lock, users) {
   return withLock(lock, async () => {
     releaseLease(users);
     if (livingLeases(users).length > 0 || !(await isRunning(cluster))) return;
-    await control(cluster, ['-m', 'fast', '-w', 'stop']);
+    await control(cluster, ['-m', 'fast', '-w', 'stop'], { whileStopping: true });
   });
 }
 
@@ -73,7 +69,7 @@ async function locate(name) {
     home,
     data: path.join(home, 'cluster'),
     passwordFile: path.join(folder, 'passwords.json'),
-    programs: await findPostgres(),
+    programs: await bringPostgres(),
   };
 }
 
@@ -127,7 +123,7 @@ async function start(cluster, firstPort) {
 }
 
 async function isRunning(cluster) {
-  const { code } = await control(cluster, ['status'], { mayFail: true });
+  const { code } = await control(cluster, ['status'], { mayFail: true, whileStopping: true });
   return code === 0;
 }
 
@@ -136,9 +132,9 @@ function portOf(cluster) {
   return Number(lines[3]);
 }
 
-function control(cluster, args, options = {}) {
+function control(cluster, args, { mayFail = false, whileStopping = false } = {}) {
   // no pipes: the server would inherit them and keep them open
-  const how = { ...as(cluster), ...options, output: 'none' };
+  const how = { ...as(cluster), mayFail, output: 'none', finish: true, whileStopping };
   return run(cluster.programs.path('pg_ctl'), ['-D', cluster.data, ...args], how);
 }
 

@@ -3,18 +3,21 @@ import { spawn } from 'node:child_process';
 import { SetupError } from './say.mjs';
 
 const running = new Set();
+let closed = false;
 
 /**
  * Runs a program to its end, in a process group of its own, so that Ctrl-C reaches it through
  * `stopRunning` and not halfway.
  *
- * @param options spawn's, and: `output` 'none' | 'show' (default: kept, and told on failure);
- *   `mayFail`: a code other than 0 is returned, not thrown; `finish`: never interrupted
+ * @param options spawn's, and: `output` 'none' (default: kept, and told on failure);
+ *   `mayFail`: a code other than 0 is returned, not thrown; `finish`: never interrupted;
+ *   `whileStopping`: allowed to begin after `stopRunning`
  * @returns exit code and what it wrote
  */
 export function run(command, args, options = {}) {
-  const { output = 'keep', mayFail = false, finish = false, ...spawnOptions } = options;
-  const stdio = { none: 'ignore', show: 'inherit', keep: 'pipe' }[output];
+  const { output = 'keep', mayFail, finish, whileStopping, ...spawnOptions } = options;
+  if (closed && !whileStopping) return Promise.reject(new SetupError('Stopped.'));
+  const stdio = { none: 'ignore', keep: 'pipe' }[output];
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, {
       ...spawnOptions,
@@ -38,8 +41,9 @@ export function run(command, args, options = {}) {
   });
 }
 
-/** Ends what `run` has running, and waits; what must finish is waited for. */
+/** Ends what `run` has running, waits for what must finish, and lets nothing new begin. */
 export async function stopRunning(onWait = () => undefined) {
+  closed = true;
   const entries = [...running];
   if (entries.some(({ finish }) => finish)) onWait();
   for (const { child, finish } of entries) if (!finish) signalGroup(child, 'SIGTERM');

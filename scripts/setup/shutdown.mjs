@@ -14,7 +14,7 @@ export const isStopping = () => stopping !== null;
 /** Stops all that this process started, once. A cleanup that fails does not keep the others. */
 export function shutDown() {
   stopping ??= (async () => {
-    await stopRunning(() => say('Letting Debian finish its packages first …'));
+    await stopRunning(() => say('Letting what cannot be cut short finish first …'));
     for (const cleanup of cleanups.reverse()) {
       await Promise.resolve()
         .then(cleanup)

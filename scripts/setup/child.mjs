@@ -1,0 +1,24 @@
+import { spawn } from 'node:child_process';
+
+import { onShutdown } from './shutdown.mjs';
+
+const PATIENCE_MS = 15_000;
+
+/**
+ * Starts a program that runs along with this process and is stopped at its shutdown.
+ * @returns the child, and a promise of its exit code, signal, or why it could not begin
+ */
+export function startChild(command, args, options) {
+  const child = spawn(command, args, options);
+  const ended = new Promise((resolve) => {
+    child.once('error', (error) => resolve(error.message));
+    child.once('exit', (code, signal) => resolve(code ?? signal));
+  });
+  onShutdown(async () => {
+    if (child.exitCode === null && child.signalCode === null) child.kill('SIGTERM');
+    const late = setTimeout(() => child.kill('SIGKILL'), PATIENCE_MS);
+    await ended;
+    clearTimeout(late);
+  });
+  return { child, ended };
+}
