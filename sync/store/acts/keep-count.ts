@@ -1,0 +1,66 @@
+import type { TallyKey } from '../../../shared/model/tally';
+import { nameTally, shownTally } from '../../merge/tally';
+import { withCounts, type ProjectChange } from '../project-change';
+import { toUndoable, type OwnAct, type ProjectRecord, type TallyRecord } from '../project-record';
+import { sql } from '../sql-text';
+import type { Work, WrittenAct } from '../work';
+
+/** The count's row, opened at its first act. */
+export function openTally(work: Work, record: ProjectRecord, key: TallyKey): TallyRecord {
+  const known = record.tallies.get(nameTally(key));
+  if (known) return known;
+  work.lastTallyNo += 1;
+  work.statements.push(
+    sql`INSERT INTO tally_key (no, scope_id, step, lane, kind)
+      VALUES (${work.lastTallyNo}, ${record.view.id}, ${key.step}, ${key.lane}, ${key.kind})`,
+  );
+  return { no: work.lastTallyNo, tapPart: 0, offset: 0, ruling: null };
+}
+
+/** Writes a changed count, and the project's last place of work, and remembers both. */
+export function keepCount(
+  work: Work,
+  record: ProjectRecord,
+  key: TallyKey,
+  written: WrittenAct,
+  tally: TallyRecord,
+  newest: OwnAct | null,
+): void {
+  const { id } = record.view;
+  const { no, tapPart, offset, ruling } = tally;
+  work.statements.push(
+    sql`INSERT OR REPLACE INTO view_tally
+      (tally_no, tap_part, "offset", set_session, set_seq, set_stamp_ms)
+      VALUES (${no}, ${tapPart}, ${offset}, ${ruling?.session ?? null}, ${ruling?.seq ?? null},
+        ${ruling?.stampMs ?? null})`,
+    sql`UPDATE project SET worked_ms = ${written.stampMs}, last_step = ${key.step}
+      WHERE scope_id = ${id}`,
+  );
+  const { step, lane, kind } = key;
+  const change: ProjectChange = {
+    kind: 'counts',
+    id,
+    tallies: [{ step, lane, kind, shown: shownTally(tally) }],
+    undoable: [{ step, act: newest && toUndoable(newest) }],
+    workedAtMs: written.stampMs,
+    lastStepKey: step,
+  };
+  work.records.set(id, {
+    ...record,
+    view: withCounts(record.view, change),
+    tallies: new Map(record.tallies).set(nameTally(key), tally),
+    newest: withNewest(record.newest, step, newest),
+  });
+  if (!record.deleted) work.changes.push(change);
+}
+
+function withNewest(
+  newest: ProjectRecord['newest'],
+  step: string,
+  act: OwnAct | null,
+): ProjectRecord['newest'] {
+  const next = new Map(newest);
+  if (act) next.set(step, act);
+  else next.delete(step);
+  return next;
+}

@@ -1,0 +1,110 @@
+import type { ProjectView } from '../client/projects-client';
+import type { Answer, Command } from './command';
+import { migrate } from './migrate';
+import { mintSession } from './mint-session';
+import { performCommand, type WriteCommand } from './perform-command';
+import type { ProjectChange } from './project-change';
+import { readAnswers } from './read/read-answers';
+import { readDurability } from './read/read-durability';
+import { loadState, viewsOf } from './read/load-state';
+import { saveCopy } from './read/save-copy';
+import type { SqlDatabase } from './sql-database';
+import { sql } from './sql-text';
+import type { StoreTools } from './store-tools';
+import { beginWork, type StoreState, type Work } from './work';
+import { createQueue, writeAll } from './write-queue';
+
+export interface Performed {
+  answer: Answer;
+  /** what the act changed, once it is on disk */
+  changes: readonly ProjectChange[];
+}
+
+/** One opened database: the only writer of its file. */
+export interface Store {
+  projects(): readonly ProjectView[];
+  /**
+   * Does a command in its turn, in one transaction. A request that was done before, by this store
+   * or by an earlier opening of its file, is not done again but answered the same.
+   *
+   * @throws what SQLite throws when the transaction fails; then nothing was written
+   */
+  perform(request: string, command: Command): Promise<Performed>;
+  /** Ends after what was asked for before. */
+  close(): Promise<void>;
+}
+
+interface Opened {
+  db: SqlDatabase;
+  tools: StoreTools;
+  state: StoreState;
+  answers: Map<string, Answer>;
+  /** a commit failed: the memory is to be read again before the next write */
+  stale: boolean;
+}
+
+/**
+ * Migrates and reads the database.
+ *
+ * @throws NewerSchemaError when a newer build wrote it
+ */
+export async function openStore(db: SqlDatabase, tools: StoreTools): Promise<Store> {
+  await migrate(db);
+  const opened: Opened = {
+    db,
+    tools,
+    answers: await readAnswers(db, tools.nowMs()),
+    state: await loadState(db),
+    stale: false,
+  };
+  const inTurn = createQueue();
+  return {
+    projects: () => viewsOf(opened.state.records.values()),
+    perform: (request, command) => inTurn(() => perform(opened, request, command)),
+    close: () => inTurn(() => db.close()),
+  };
+}
+
+async function perform(opened: Opened, request: string, command: Command): Promise<Performed> {
+  if (command.do === 'durability') return answerWith(await readDurability(opened.db));
+  if (command.do === 'saveCopy') return answerWith(await saveCopy(opened.db, opened.tools.nowMs()));
+  if (opened.stale) await refresh(opened);
+  const known = opened.answers.get(request);
+  if (known) return { answer: known, changes: [] };
+  return write(opened, request, command);
+}
+
+const answerWith = (text: string): Performed => ({ answer: { ok: true, text }, changes: [] });
+
+async function write(opened: Opened, request: string, command: WriteCommand): Promise<Performed> {
+  const { db, tools } = opened;
+  const session = opened.state.session ?? mintSession(await tools.random16());
+  const work = beginWork(opened.state, session, tools.nowMs());
+  const begun = work.statements.length;
+  const answer = await performCommand(db, work, tools, command);
+  if (!answer.ok || work.statements.length === begun) return { answer, changes: [] };
+  await commit(opened, work, request, answer);
+  return { answer, changes: work.changes };
+}
+
+async function commit(opened: Opened, work: Work, request: string, answer: Answer): Promise<void> {
+  const kept = sql`INSERT INTO request (id, answer, at_ms)
+    VALUES (${request}, ${JSON.stringify(answer)}, ${work.nowMs})`;
+  try {
+    await writeAll(opened.db, [...work.statements, kept]);
+  } catch (error) {
+    // Whether it reached the disk is not known: read again, and name no act twice by a new session.
+    opened.stale = true;
+    await refresh(opened).catch(() => undefined);
+    throw error;
+  }
+  const { records, session, seqs, lastOrd, lastTallyNo, lastTimeMs } = work;
+  opened.state = { records, session, seqs, lastOrd, lastTallyNo, lastTimeMs };
+  opened.answers.set(request, answer);
+}
+
+async function refresh(opened: Opened): Promise<void> {
+  opened.answers = await readAnswers(opened.db, opened.tools.nowMs());
+  opened.state = await loadState(opened.db);
+  opened.stale = false;
+}
