@@ -16,7 +16,11 @@ export const RoundedLengthSchema = z.strictObject({
 });
 
 /** A length of a plan, in inches; never a bare rounded number. */
-export const LengthSchema = z.union([FractionTextSchema, TemplateLengthSchema, RoundedLengthSchema]);
+export const LengthSchema = z.union([
+  FractionTextSchema,
+  TemplateLengthSchema,
+  RoundedLengthSchema,
+]);
 export type TemplateLength = z.output<typeof TemplateLengthSchema>;
 export type RoundedLength = z.output<typeof RoundedLengthSchema>;
 export type Length = z.output<typeof LengthSchema>;

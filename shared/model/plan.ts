@@ -1,7 +1,12 @@
 import { z } from 'zod';
 
 import { CAUTIONS, DIAGRAMS, MISTAKES, REFUSALS, STATIONS, STEP_ROLES, WARNINGS } from './codes';
-import { FractionTextSchema, LengthSchema, RoundedLengthSchema, TemplateLengthSchema } from './length';
+import {
+  FractionTextSchema,
+  LengthSchema,
+  RoundedLengthSchema,
+  TemplateLengthSchema,
+} from './length';
 import { PlanRequestSchema } from './plan-request';
 
 const CountSchema = z.int().min(0);
