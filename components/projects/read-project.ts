@@ -11,16 +11,17 @@ export interface ProjectReading {
   progress: Progress;
 }
 
-const plans = new WeakMap<ProjectView['request'], Plan>();
+const plans = new Map<string, { request: string; plan: Plan }>();
 const readings = new WeakMap<ProjectView, ProjectReading>();
 
-/** A plan takes milliseconds to make and a project is read at every tap, so it is made once. */
-function planOf({ request }: ProjectView): Plan {
-  const known = plans.get(request);
-  if (known) return known;
-  const made = makePlan(request);
+/** Making a plan takes longer than a tap may, and a request does not change, so it is made once. */
+function planOf(project: ProjectView): Plan {
+  const request = JSON.stringify(project.request);
+  const known = plans.get(project.id);
+  if (known?.request === request) return known.plan;
+  const made = makePlan(project.request);
   if (!made.ok) throw new InvariantError('a kept project cannot be planned');
-  plans.set(request, made.value);
+  plans.set(project.id, { request, plan: made.value });
   return made.value;
 }
 
