@@ -4,9 +4,9 @@ import { isNativeError } from 'node:util/types';
 // 57P01–57P03 shutting down or starting, 53300 too many connections; the rest are Node's.
 const AWAY =
   /^(08...|57P0[123]|53300|ECONNREFUSED|ECONNRESET|EPIPE|ETIMEDOUT|ENOTFOUND|EAI_AGAIN|EHOSTUNREACH)$/;
-// pg gives these no code; TypeORM's own error is a data source that has not connected yet
-const WORDS = /^(Connection terminated|timeout exceeded when trying to connect)/;
-const NAMES = ['CannotExecuteNotConnectedError', 'ConnectionIsNotSetError'];
+// errors without a code: pg's own, and TypeORM's for a data source that has not connected yet
+const WORDS =
+  /^(Connection terminated|timeout exceeded when trying to connect|Driver not Connected$)/;
 
 /** Whether an error means that PostgreSQL cannot be reached, and not that a query is wrong. */
 export function isDatabaseAway(error: unknown): boolean {
@@ -14,5 +14,5 @@ export function isDatabaseAway(error: unknown): boolean {
   // a name with two addresses, both refused
   if ('errors' in error && Array.isArray(error.errors)) return error.errors.some(isDatabaseAway);
   if ('code' in error && typeof error.code === 'string') return AWAY.test(error.code);
-  return WORDS.test(error.message) || NAMES.includes(error.name);
+  return WORDS.test(error.message);
 }

@@ -20,10 +20,11 @@ function describeError(error: Error): object {
   return { name, code, constraint, places };
 }
 
-// The pattern of the route and not the address itself, which may hold an id or a name.
+// The pattern of the route and not the address itself, which may hold an id or a name. Routes are
+// written in full, as a failed request has left the router that it was under.
 function routeOf(request: Request): string | null {
   const path: unknown = request.route?.path;
-  return typeof path === 'string' ? request.baseUrl + path : null;
+  return typeof path === 'string' ? path : null;
 }
 
 /** One line a request, with an id that the answer carries too, and no personal data. */
