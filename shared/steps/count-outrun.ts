@@ -2,11 +2,10 @@ import { madePerTap } from './finish-steps';
 import {
   addAmount,
   amountOf,
-  eachAmount,
   type Amounts,
   type ItemAmounts,
   type LaneState,
-  type StepState,
+  type WorkState,
 } from './read-items';
 
 /**
@@ -14,13 +13,13 @@ import {
  * goes to the steps in their order of work, and within one to its lanes in order.
  */
 export function countOutrun(
-  states: readonly StepState[],
+  { steps }: WorkState,
   { made, lost }: ItemAmounts,
 ): Map<string, number> {
   const pool: Amounts = new Map(made);
-  for (const [item, pieces] of lost) addAmount(pool, item, pieces.neg());
+  for (const [item, parts] of lost) addAmount(pool, item, -parts);
   return new Map(
-    states.map(({ step, lanes }) => [
+    steps.map(({ step, lanes }) => [
       step.key,
       lanes.reduce((sum, state) => sum + shortTaps(state, pool) * madePerTap(state.lane), 0),
     ]),
@@ -28,14 +27,12 @@ export function countOutrun(
 }
 
 /** Taps of one lane that found no input; takes what the lane used out of the pool. */
-function shortTaps({ lane, done }: LaneState, pool: Amounts): number {
+function shortTaps({ uses, done }: LaneState, pool: Amounts): number {
   let most = 0;
-  eachAmount(lane.consumes, (item, each) => {
-    const used = each.mul(done);
-    const there = amountOf(pool, item);
-    const short = used.sub(there.lt(0) ? 0 : there);
-    most = Math.max(most, short.div(each).ceil().valueOf());
-    addAmount(pool, item, used.neg());
-  });
-  return Math.min(most, done);
+  for (const [item, each] of uses) {
+    const short = each * done - Math.max(0, amountOf(pool, item));
+    most = Math.max(most, Math.ceil(short / each));
+    addAmount(pool, item, -each * done);
+  }
+  return most;
 }

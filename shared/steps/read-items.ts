@@ -1,20 +1,28 @@
-import Fraction from 'fraction.js';
-
 import type { PlanLane, PlanStep } from '../model/plan';
 import type { ExtraLane, Tally } from '../model/tally';
+import { inParts, partsPerWhole } from './parts-per-whole';
 
-/** Whole counts as they are, parts of a thing as exact fractions. */
-export type Amounts = Map<string, Fraction>;
+/** Amounts by item, in whole parts: `parts` of them are one piece, strip or stack. */
+export type Amounts = Map<string, number>;
 
 export interface LaneState {
   lane: PlanLane;
   extra: boolean;
+  /** taps that stand: done − unpicked */
   done: number;
+  /** what one tap uses and makes, by item, in parts */
+  uses: [item: string, parts: number][];
+  makes: [item: string, parts: number][];
 }
 
 export interface StepState {
   step: PlanStep;
   lanes: LaneState[];
+}
+
+export interface WorkState {
+  parts: number;
+  steps: StepState[];
 }
 
 export interface ItemAmounts {
@@ -23,62 +31,60 @@ export interface ItemAmounts {
   lost: Amounts;
 }
 
-const NONE = new Fraction(0);
-
-export function amountOf(amounts: Amounts, item: string): Fraction {
-  return amounts.get(item) ?? NONE;
+export function amountOf(amounts: Amounts, item: string): number {
+  return amounts.get(item) ?? 0;
 }
 
-export function addAmount(amounts: Amounts, item: string, amount: Fraction): void {
-  amounts.set(item, amountOf(amounts, item).add(amount));
+export function addAmount(amounts: Amounts, item: string, parts: number): void {
+  amounts.set(item, amountOf(amounts, item) + parts);
 }
 
-/** Every step's lanes, extra ones last, with the taps that stand: done − unpicked. */
-export function readLanes(
+/** Every step's lanes, extra ones last, with the taps that stand. */
+export function readWork(
   steps: readonly PlanStep[],
   extraLanes: readonly ExtraLane[],
   tallies: readonly Tally[],
-): StepState[] {
+): WorkState {
+  const parts = partsPerWhole([...steps.flatMap(({ lanes }) => lanes), ...extraLanes]);
   const shown = new Map(tallies.map((tally) => [tallyId(tally), tally.shown]));
-  return steps.map((step) => {
-    const countOf = (lane: string, kind: Tally['kind']) =>
-      shown.get(tallyId({ step: step.key, lane, kind })) ?? 0;
-    const stateOf = (lane: PlanLane, extra: boolean): LaneState => ({
+  const stateOf = (step: PlanStep, lane: PlanLane, extra: boolean): LaneState => {
+    const countOf = (kind: Tally['kind']) =>
+      shown.get(tallyId({ step: step.key, lane: lane.key, kind })) ?? 0;
+    return {
       lane,
       extra,
-      done: Math.max(0, countOf(lane.key, 'done') - countOf(lane.key, 'unpicked')),
-    });
-    const own = extraLanes.filter((lane) => lane.step === step.key);
-    return {
+      done: Math.max(0, countOf('done') - countOf('unpicked')),
+      uses: Object.entries(lane.consumes).map(([item, each]) => [item, inParts(each, parts)]),
+      makes: Object.entries(lane.makes).map(([item, each]) => [item, each * parts]),
+    };
+  };
+  return {
+    parts,
+    steps: steps.map((step) => ({
       step,
       lanes: [
-        ...step.lanes.map((lane) => stateOf(lane, false)),
-        ...own.map((lane) => stateOf(lane, true)),
+        ...step.lanes.map((lane) => stateOf(step, lane, false)),
+        ...extraLanes
+          .filter((lane) => lane.step === step.key)
+          .map((lane) => stateOf(step, lane, true)),
       ],
-    };
-  });
+    })),
+  };
 }
 
 /** What was made, used and lost of every item; unpicking has given its inputs back. */
-export function readItems(states: readonly StepState[], tallies: readonly Tally[]): ItemAmounts {
+export function readItems({ steps, parts }: WorkState, tallies: readonly Tally[]): ItemAmounts {
   const items: ItemAmounts = { made: new Map(), used: new Map(), lost: new Map() };
-  for (const { lane, done } of states.flatMap(({ lanes }) => lanes)) {
-    eachAmount(lane.consumes, (item, each) => addAmount(items.used, item, each.mul(done)));
-    eachAmount(lane.makes, (item, each) => addAmount(items.made, item, each.mul(done)));
+  for (const { uses, makes, done } of steps.flatMap(({ lanes }) => lanes)) {
+    for (const [item, each] of uses) addAmount(items.used, item, each * done);
+    for (const [item, each] of makes) addAmount(items.made, item, each * done);
   }
   for (const { lane, kind, shown } of tallies) {
-    if (kind === 'lost') addAmount(items.lost, lane, new Fraction(shown));
+    if (kind === 'lost') addAmount(items.lost, lane, shown * parts);
   }
   return items;
 }
 
-export function eachAmount(
-  amounts: PlanLane['consumes'],
-  visit: (item: string, each: Fraction) => void,
-): void {
-  for (const [item, each] of Object.entries(amounts)) visit(item, new Fraction(each));
-}
-
 function tallyId({ step, lane, kind }: Pick<Tally, 'step' | 'lane' | 'kind'>): string {
-  return JSON.stringify([step, lane, kind]);
+  return `${kind}\n${lane}\n${step}`;
 }

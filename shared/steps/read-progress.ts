@@ -1,25 +1,28 @@
 import type { PlanStep } from '../model/plan';
-import type {
-  ExtraLane,
-  ItemProgress,
-  LaneProgress,
-  Progress,
-  StepProgress,
-  Tally,
-} from '../model/tally';
-import { madePerTap } from './finish-steps';
+import type { ExtraLane, LaneProgress, Progress, StepProgress, Tally } from '../model/tally';
 import { countOutrun } from './count-outrun';
+import { madePerTap } from './finish-steps';
 import { possibleTaps } from './possible-taps';
 import {
   amountOf,
   readItems,
-  readLanes,
+  readWork,
   type Amounts,
   type ItemAmounts,
   type StepState,
+  type WorkState,
 } from './read-items';
 import { readNeeds } from './read-needs';
 import { readReady } from './read-ready';
+
+/** All that the steps of one project share while they are read. */
+interface Flow {
+  parts: number;
+  items: ItemAmounts;
+  onHand: Amounts;
+  extra: Amounts;
+  outrun: ReadonlyMap<string, number>;
+}
 
 /**
  * How far a project is: what every step has made and may make now, and what is on hand.
@@ -33,69 +36,59 @@ export function readProgress(
   extraLanes: readonly ExtraLane[],
   tallies: readonly Tally[],
 ): Progress {
-  const states = readLanes(steps, extraLanes, tallies);
-  const items = readItems(states, tallies);
-  const onHand = readOnHand(states, items);
-  const extra = readNeeds(steps, items.lost);
-  const outrun = countOutrun(states, items);
+  const work = readWork(steps, extraLanes, tallies);
+  const items = readItems(work, tallies);
+  const { parts } = work;
+  const onHand = readOnHand(work, items);
+  const extra = readNeeds(work, items.lost);
+  const flow: Flow = { parts, items, onHand, extra, outrun: countOutrun(work, items) };
   return {
-    steps: states.map((state) => readStep(state, items, onHand, extra, outrun)),
-    items: [...onHand.keys()].map((item) => readItem(item, items, onHand)),
+    steps: work.steps.map((state) => readStep(state, flow)),
+    items: [...onHand].map(([item, here]) => ({
+      item,
+      made: amountOf(items.made, item) / parts,
+      lost: amountOf(items.lost, item) / parts,
+      used: amountOf(items.used, item) / parts,
+      onHand: here / parts,
+    })),
   };
 }
 
-function readStep(
-  state: StepState,
-  items: ItemAmounts,
-  onHand: Amounts,
-  extra: Amounts,
-  outrun: ReadonlyMap<string, number>,
-): StepProgress {
+function readStep(state: StepState, flow: Flow): StepProgress {
   const { key, role, position, station, target, lanes: planned } = state.step;
   const products = new Set(planned.flatMap(({ makes }) => Object.keys(makes)));
   const total = (amounts: Amounts) =>
-    [...products].reduce((sum, item) => sum + amountOf(amounts, item).valueOf(), 0);
-  const lanes = state.lanes.map(({ lane, extra: opened, done }): LaneProgress => ({
-    lane,
-    extra: opened,
-    done,
-    possible: possibleTaps(lane, onHand),
-    perTap: madePerTap(lane),
+    [...products].reduce((sum, item) => sum + amountOf(amounts, item), 0) / flow.parts;
+  const lanes = state.lanes.map((lane): LaneProgress => ({
+    lane: lane.lane,
+    extra: lane.extra,
+    done: lane.done,
+    possible: possibleTaps(lane, flow.onHand),
+    perTap: madePerTap(lane.lane),
   }));
   const made = lanes.reduce((sum, { done, perTap }) => sum + done * perTap, 0);
-  const lost = total(items.lost);
+  const lost = total(flow.items.lost);
   return {
     key,
     role,
     position,
     station,
-    target: target + total(extra),
+    target: target + total(flow.extra),
     made,
     lost,
     good: Math.max(0, made - lost),
-    ...readReady(state, items, onHand, extra),
-    outrun: outrun.get(key) ?? 0,
+    ...readReady(state, flow.items, flow.onHand, flow.extra, flow.parts),
+    outrun: flow.outrun.get(key) ?? 0,
     lanes,
   };
 }
 
-function readOnHand(states: readonly StepState[], items: ItemAmounts): Amounts {
-  const lanes = states.flatMap((state) => state.lanes);
-  const names = new Set(lanes.flatMap(({ lane }) => Object.keys(lane.makes)));
-  return new Map(
-    [...names].map((item) => [
-      item,
-      amountOf(items.made, item).sub(amountOf(items.lost, item)).sub(amountOf(items.used, item)),
-    ]),
-  );
-}
-
-function readItem(item: string, items: ItemAmounts, onHand: Amounts): ItemProgress {
-  return {
-    item,
-    made: amountOf(items.made, item).valueOf(),
-    lost: amountOf(items.lost, item).valueOf(),
-    used: amountOf(items.used, item).valueOf(),
-    onHand: amountOf(onHand, item).valueOf(),
-  };
+function readOnHand({ steps }: WorkState, { made, lost, used }: ItemAmounts): Amounts {
+  const onHand: Amounts = new Map();
+  for (const { makes } of steps.flatMap(({ lanes }) => lanes)) {
+    for (const [item] of makes) {
+      onHand.set(item, amountOf(made, item) - amountOf(lost, item) - amountOf(used, item));
+    }
+  }
+  return onHand;
 }

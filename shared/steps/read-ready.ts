@@ -1,14 +1,11 @@
-import Fraction from 'fraction.js';
-
-import type { PlanLane } from '../model/plan';
 import type { StepProgress } from '../model/tally';
 import { possibleTaps } from './possible-taps';
 import {
   addAmount,
   amountOf,
-  eachAmount,
   type Amounts,
   type ItemAmounts,
+  type LaneState,
   type StepState,
 } from './read-items';
 
@@ -17,77 +14,73 @@ import {
  * that is nothing. Lanes that share an input get it in their order; wedges to recut come from cloth.
  *
  * @param extra what must be made beyond the plan, by item
+ * @param parts parts of one piece, in which all amounts count
  */
 export function readReady(
   { step, lanes }: StepState,
   items: ItemAmounts,
   onHand: Amounts,
   extra: Amounts,
+  parts: number,
 ): Pick<StepProgress, 'toGo' | 'ready' | 'waitingFor'> {
-  const needs = stillNeeded(step.lanes, items.made, extra);
-  const toGo = sum(needs);
+  const planned = lanes.filter((lane) => !lane.extra);
+  const needs = stillNeeded(planned, items.made, extra);
   const stock: Amounts = new Map(onHand);
   const left: Amounts = new Map(needs);
-  for (const { lane } of lanes) {
+  for (const lane of lanes) {
     const wanted = tapsFor(lane, left);
     const taps = Math.min(wanted, possibleTaps(lane, stock) ?? wanted);
-    eachAmount(lane.consumes, (item, each) => addAmount(stock, item, each.mul(-taps)));
-    eachAmount(lane.makes, (item, each) => takeFrom(left, item, each.mul(taps)));
+    for (const [item, each] of lane.uses) addAmount(stock, item, -each * taps);
+    for (const [item, each] of lane.makes) takeFrom(left, item, each * taps);
   }
   if (step.role === 'cut') for (const [item, pieces] of extra) takeFrom(left, item, pieces);
-  const ready = toGo - sum(left);
-  const waitingFor = ready === 0 && toGo > 0 ? missingItems(step.lanes, needs, onHand) : [];
+  const toGo = sum(needs) / parts;
+  const ready = toGo - sum(left) / parts;
+  const waitingFor = ready === 0 && toGo > 0 ? missingItems(planned, needs, onHand, parts) : [];
   return { toGo, ready, waitingFor };
 }
 
-function stillNeeded(lanes: readonly PlanLane[], made: Amounts, extra: Amounts): Amounts {
+function stillNeeded(lanes: readonly LaneState[], made: Amounts, extra: Amounts): Amounts {
   const needs: Amounts = new Map();
-  for (const lane of lanes) {
-    eachAmount(lane.makes, (item, each) => addAmount(needs, item, each.mul(lane.target)));
+  for (const { lane, makes } of lanes) {
+    for (const [item, each] of makes) addAmount(needs, item, each * lane.target);
   }
   for (const [item, planned] of needs) {
-    const needed = planned.add(amountOf(extra, item)).sub(amountOf(made, item));
-    needs.set(item, needed.lt(0) ? new Fraction(0) : needed);
+    needs.set(item, Math.max(0, planned + amountOf(extra, item) - amountOf(made, item)));
   }
   return needs;
 }
 
-function tapsFor(lane: PlanLane, needs: Amounts): number {
-  let taps = 0;
-  eachAmount(lane.makes, (item, each) => {
-    taps = Math.max(taps, amountOf(needs, item).div(each).ceil().valueOf());
-  });
-  return taps;
+function tapsFor({ makes }: LaneState, needs: Amounts): number {
+  return Math.max(0, ...makes.map(([item, each]) => Math.ceil(amountOf(needs, item) / each)));
 }
 
-function takeFrom(amounts: Amounts, item: string, amount: Fraction): void {
-  if (!amounts.has(item)) return;
-  const left = amountOf(amounts, item).sub(amount);
-  amounts.set(item, left.lt(0) ? new Fraction(0) : left);
+function takeFrom(amounts: Amounts, item: string, parts: number): void {
+  if (amounts.has(item)) amounts.set(item, Math.max(0, amountOf(amounts, item) - parts));
 }
 
 /** The inputs of which not even one tap's worth is there, for all that is still to make. */
 function missingItems(
-  lanes: readonly PlanLane[],
+  lanes: readonly LaneState[],
   needs: Amounts,
   onHand: Amounts,
+  parts: number,
 ): StepProgress['waitingFor'] {
   const wanted: Amounts = new Map();
   const short = new Set<string>();
   for (const lane of lanes) {
     const taps = tapsFor(lane, needs);
-    eachAmount(lane.consumes, (item, each) => {
-      addAmount(wanted, item, each.mul(taps));
-      if (taps > 0 && amountOf(onHand, item).lt(each)) short.add(item);
-    });
+    for (const [item, each] of lane.uses) {
+      addAmount(wanted, item, each * taps);
+      if (taps > 0 && amountOf(onHand, item) < each) short.add(item);
+    }
   }
   return [...short].map((item) => {
-    const here = amountOf(onHand, item);
-    const missing = amountOf(wanted, item).sub(here.lt(0) ? 0 : here);
-    return { item, missing: missing.ceil().valueOf() };
+    const missing = amountOf(wanted, item) - Math.max(0, amountOf(onHand, item));
+    return { item, missing: Math.ceil(missing / parts) };
   });
 }
 
 function sum(amounts: Amounts): number {
-  return [...amounts.values()].reduce((total, amount) => total + amount.valueOf(), 0);
+  return [...amounts.values()].reduce((total, amount) => total + amount, 0);
 }
