@@ -1,3 +1,4 @@
+import { joinWords } from '@/components/station/enough-text';
 import type { WarningCode } from '@/shared/model/codes';
 import type { Plan, PlanWarning } from '@/shared/model/plan';
 import { formatExact, formatInches, formatYards } from '@/shared/units/format-fraction';
@@ -19,12 +20,6 @@ function inches(value: string | number | undefined): string {
 
 const yards = (value: string | number | undefined) => formatYards(String(value ?? '0'));
 const letters = (value: string | number | undefined) => String(value ?? '').split('+');
-
-/** "A, B and C" */
-function join(words: readonly string[]): string {
-  if (words.length < 2) return words.join('');
-  return `${words.slice(0, -1).join(', ')} and ${words[words.length - 1]}`;
-}
 
 /** What a maker reads for each code; `name` is the first named fabric's own name. */
 const TEXTS: Record<WarningCode, (params: Params, name: string, plan: Plan) => Words> = {
@@ -61,9 +56,9 @@ const TEXTS: Record<WarningCode, (params: Params, name: string, plan: Plan) => W
     text: 'So no two neighbours match.',
   }),
   extraWedges: ({ fabrics, count, left }) => ({
-    title: `${count} more a plate of ${join(letters(fabrics))}.`,
+    title: `${count} more a plate of ${joinWords(letters(fabrics))}.`,
     text: left
-      ? `Every cut gives one of each, so some of ${join(letters(left))} stay over.`
+      ? `Every cut gives one of each, so some of ${joinWords(letters(left))} stay over.`
       : 'The wedges do not share out evenly over the fabrics.',
   }),
   dominantOffDiagonals: ({ axes }, name, plan) => ({

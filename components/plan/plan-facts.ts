@@ -1,6 +1,6 @@
 import type { Length } from '@/shared/model/length';
 import type { Plan, PlanStack } from '@/shared/model/plan';
-import { formatExact, formatInches } from '@/shared/units/format-fraction';
+import { formatExact, formatInches, formatYards } from '@/shared/units/format-fraction';
 import { toFraction, toText } from '@/shared/units/fraction';
 
 export interface Fact {
@@ -24,6 +24,11 @@ export function writeStack(stack: PlanStack): string {
   const stacks = count(stack.count, 'stack', 'stacks');
   const layers = count(stack.layers.length, 'layer', 'layers');
   return `${stacks} of ${layers}, ${count(stack.cutsEach, 'cut', 'cuts')}${stack.count > 1 ? ' each' : ''}`;
+}
+
+/** "8 strips, 1½ yd" */
+export function writeTotals({ totals }: Plan): string {
+  return `${count(totals.strips, 'strip', 'strips')}, ${formatYards(totals.buyYards)}`;
 }
 
 /** An angle in degrees, two decimals at most. */

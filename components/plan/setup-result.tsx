@@ -4,20 +4,13 @@ import { BlockDrawing } from '@/components/diagrams/block-drawing';
 import { buyFabric } from '@/components/plan/draft-fabrics';
 import { FabricTable } from '@/components/plan/fabric-table';
 import { FactList } from '@/components/plan/fact-list';
-import { count, listFacts } from '@/components/plan/plan-facts';
+import { count, listFacts, writeTotals } from '@/components/plan/plan-facts';
 import { PlanWarnings } from '@/components/plan/plan-warnings';
 import type { Setup } from '@/components/plan/use-setup';
 import { Note } from '@/components/ui/note';
 import { border, radius, space, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { useLayout } from '@/components/ui/use-layout';
-import type { Plan } from '@/shared/model/plan';
-import { formatYards } from '@/shared/units/format-fraction';
-
-/** "8 strips, 1½ yd" */
-export function writeTotals({ totals }: Plan): string {
-  return `${count(totals.strips, 'strip', 'strips')}, ${formatYards(totals.buyYards)}`;
-}
 
 /** What the form comes to, live; while something is wrong the last good result stays, dimmed. */
 export function SetupResult({ setup }: { setup: Setup }) {

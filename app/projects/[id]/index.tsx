@@ -1,0 +1,1 @@
+export { ProjectScreen as default } from '@/components/projects/project-screen';

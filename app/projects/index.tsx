@@ -1,0 +1,1 @@
+export { ProjectsScreen as default } from '@/components/projects/projects-screen';
