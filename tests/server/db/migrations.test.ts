@@ -35,7 +35,7 @@ it('takes each step up, down without a trace, and up again to the same', async (
   await db.runMigrations({ transaction: 'each' });
   const full = await db.query(EVERYTHING);
   const states: unknown[] = [full];
-  for (const _step of db.migrations) {
+  for (let undone = 0; undone < db.migrations.length; undone += 1) {
     await db.undoLastMigration();
     states.unshift(await db.query(EVERYTHING));
   }
