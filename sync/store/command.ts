@@ -12,7 +12,7 @@ export type Command =
   | { do: 'set'; id: string; key: TallyKey; want: number }
   | { do: 'undo'; id: string; steps: readonly string[] }
   | { do: 'addLane'; id: string; lane: ExtraLane }
-  | { do: 'openExample'; ids: readonly string[] }
+  | { do: 'openExample' }
   | { do: 'removeExample' }
   | { do: 'saveCopy' }
   | { do: 'durability' };

@@ -22,7 +22,7 @@ export async function performCommand(
   command: WriteCommand,
 ): Promise<Answer> {
   if (command.do === 'create') return create(work, tools, command);
-  if (command.do === 'openExample') return openExample(work, tools, command.ids);
+  if (command.do === 'openExample') return openExample(work, tools);
   if (command.do === 'removeExample') return removeExample(work);
   const record = work.records.get(command.id);
   if (!record) return failed('no such project');

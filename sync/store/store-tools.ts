@@ -19,5 +19,7 @@ export interface StoreTools {
   makePlan(
     request: PlanRequest,
   ): Result<Plan, { kind: 'refused'; errors: readonly Pick<PlanRefusal, 'code'>[] }>;
-  exampleProjects: readonly ExampleProject[];
+  exampleProjects(): readonly ExampleProject[];
+  /** new project ids, UUIDv7 */
+  newIds(count: number): Promise<string[]>;
 }

@@ -9,12 +9,12 @@ import { setTally } from './set-tally';
 /**
  * Opens the example's projects, each with its counts; nothing when they are open already. The
  * first of the list comes out as the newest work.
- *
- * @param ids one new project id for each
  */
-export function openExample(work: Work, tools: StoreTools, ids: readonly string[]): Answer {
+export async function openExample(work: Work, tools: StoreTools): Promise<Answer> {
   if ([...work.records.values()].some(({ view, deleted }) => view.example && !deleted)) return DONE;
-  const pairs = tools.exampleProjects.map((project, index) => ({ project, id: ids[index] }));
+  const projects = tools.exampleProjects();
+  const ids = await tools.newIds(projects.length);
+  const pairs = projects.map((project, index) => ({ project, id: ids[index] }));
   for (const { project, id } of pairs.reverse()) {
     if (id === undefined) throw new InvariantError('an id for each project of the example');
     const plan = tools.makePlan(project.request);

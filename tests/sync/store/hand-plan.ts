@@ -73,7 +73,8 @@ export function handTools(nowMs = { value: 1_000_000 }): StoreTools {
       from.wedges < 5
         ? { ok: false, kind: 'refused', errors: [{ code: 'below-least' }] }
         : { ok: true, value: planByHand(from) },
-    exampleProjects: [
+    newIds: async (count) => Array.from({ length: count }, () => `id ${(serial += 1)}`),
+    exampleProjects: () => [
       { name: 'Harbour Lights', request, counts: [{ ...cutKey, want: 6 }] },
       { name: 'Pier Runner', request, counts: [] },
     ],

@@ -154,8 +154,8 @@ describe.each(places)('a store %s', (_place, fileOf) => {
   });
 
   it('opens the example once, and takes it away for good', async () => {
-    await act({ do: 'openExample', ids: ['e1', 'e2'] });
-    await act({ do: 'openExample', ids: ['e3', 'e4'] });
+    await act({ do: 'openExample' });
+    await act({ do: 'openExample' });
     expect(store.projects().map(({ name }) => name)).toEqual([
       'Harbour Lights',
       'Pier Runner',
