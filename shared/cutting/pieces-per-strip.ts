@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 /**
  * Straight pieces across one strip: ⌊U/w⌋.

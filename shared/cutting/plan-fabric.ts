@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import type { PlanFabric, PlanStrip } from '../model/plan';
 import type { RequestFabric } from '../model/plan-request';

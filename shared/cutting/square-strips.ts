@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 import type { PlanStrip } from '../model/plan';
 import { toText } from '../units/fraction';

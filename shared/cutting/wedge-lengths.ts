@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import { InvariantError } from '../result';
 import { upToEighth } from '../units/up-to-eighth';

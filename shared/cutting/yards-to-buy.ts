@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import { upToEighthYard } from '../units/up-to-eighth-yard';
 

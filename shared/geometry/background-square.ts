@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 /**
  * The background of a plate: cut with room to spare, trimmed from the centre afterwards.

@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 import { upToEighth, upToHalf } from '../units/up-to-eighth';
 

@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 /**
  * How far the finished ring reaches from the plate's centre: R = r0 + H − e_w. The corners of a

@@ -95,12 +95,15 @@ export const WARNINGS = [
   'anotherStripAt40', // fabric, strips, atForty
   'capExceeded', // layers, cap
   'oneFabric', // fabric: every seam joins like to like
-  'neighboursClash', // two fabrics and an odd count: two neighbours must match
+  'neighboursClash', // fabric, wedges: two fabrics and an odd count: two neighbours must match
   'lastWedgeChanged', // fabric, instead: the last wedge breaks the round so that no neighbours match
-  'extraWedges', // fabrics ("A+B"), count: a plate takes more of these than of the others
-  'dominantOffDiagonals', // fabric: no wedge axis lies on the diagonals
+  // fabrics ("A+B"), count: a plate takes so many more of these than of the others;
+  // left ("C+D", or ""), leftEach: wedges of each of those that are cut and left over, in all
+  'extraWedges',
+  // fabric, axes: it does not lie on every diagonal; 4 or 0 diagonals carry a wedge's axis
+  'dominantOffDiagonals',
   'noQuarters', // wedges: not a multiple of four, so the ring is made of halves
-  'flapBelowHole', // reaches, hole: the tip's flap shows in the centre hole
+  'flapBelowHole', // reaches (a number), hole: the tip's flap shows in the centre hole
   'smallMargin', // margin: the reach is close to the block's edge or over its seam allowance
 ] as const;
 export type WarningCode = (typeof WARNINGS)[number];
@@ -118,14 +121,14 @@ export const REFUSALS = [
   'unknown-fabric', // letter
   'wrong-role', // letter, role
   'two-dominant',
-  'margin-negative', // least / most strip height that fits
-  'tip-below-hole', // the shoulder would lie inside the hole
+  'margin-negative', // most: the greatest strip height that fits
+  'tip-below-hole', // least: the strip height from which the shoulder clears the hole
   'circle-over-tips', // least: the strip height from which the circle leaves the tips free
   'narrow-edge-crossed', // least
   'strip-too-narrow', // least usable width for one wedge
   'background-wider-than-cloth', // least usable width
   'circle-wider-than-cloth', // least usable width
-  'shrink-too-large',
+  'shrink-too-large', // most percent
   'buys-too-little', // least yards
 ] as const;
 export type RefusalCode = (typeof REFUSALS)[number];

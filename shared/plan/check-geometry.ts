@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import { halfAngle } from '../geometry/half-angle';
 import type { PlanRefusal } from '../model/plan';

@@ -1,6 +1,8 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import { planFabric } from '../cutting/plan-fabric';
+import { stripRun } from '../cutting/strip-run';
+import { wedgePitch } from '../cutting/wedge-pitch';
 import type { Plan, PlanFabric, PlanStack, PlanWarning } from '../model/plan';
 import type { PlanRequest } from '../model/plan-request';
 import { planGeometry } from '../patterns/ring/plan-geometry';
@@ -111,7 +113,9 @@ function warningsOf(
   const usableWidth = toFraction(request.cloth.usableWidth);
   return [
     ...warnOfSlack(fabrics),
-    ...warnOfShortEnds(fabrics, usableWidth),
+    ...warnOfShortEnds(fabrics, usableWidth, (letter, wedges) =>
+      wedgeRun(letter, wedges, sizes, cutting),
+    ),
     ...warnOfNarrowCloth(fabrics, fabricsAtForty(request, sizes)),
     ...warnOfCap(request, stacks),
     ...warnOfOrder(cutting),
@@ -119,6 +123,18 @@ function warningsOf(
     ...warnOfDiagonals(request),
     ...warnOfShape(request, sizes),
   ];
+}
+
+function wedgeRun(
+  letter: string,
+  wedges: number,
+  { cutNarrowIn, cutWideIn }: RingGeometry,
+  { groups }: RingCutting,
+): number {
+  const oneWay = groups.some(
+    (group) => group.oneWay && group.fabrics.some((fabric) => fabric.letter === letter),
+  );
+  return stripRun(wedges, cutWideIn, wedgePitch(cutNarrowIn, cutWideIn, oneWay));
 }
 
 /** The same fabrics on narrower cloth; none when the cloth is narrow already or 40 cannot do. */

@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 import type { FractionText } from '../model/length';
 import { toFraction } from './fraction';

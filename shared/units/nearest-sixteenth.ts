@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 /**
  * The sixteenth of an inch nearest to a measured size, for showing only; halves go up.

@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import type { FractionText } from '../model/length';
 import type { Result } from '../result';

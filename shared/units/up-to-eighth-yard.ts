@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 const INCHES_PER_EIGHTH_YARD = '9/2';
 

@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 import { wedgeLengths, type WedgeLengths } from '../../cutting/wedge-lengths';
 import { wedgePitch } from '../../cutting/wedge-pitch';

@@ -1,4 +1,4 @@
-import Fraction from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
 import { backgroundSquare } from '../../geometry/background-square';
 import { centreCircle, type CentreCircle } from '../../geometry/centre-circle';

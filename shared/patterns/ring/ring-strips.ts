@@ -1,4 +1,4 @@
-import type Fraction from 'fraction.js';
+import { type Fraction } from 'fraction.js';
 
 import { squareStrips } from '../../cutting/square-strips';
 import type { PlanStrip } from '../../model/plan';
