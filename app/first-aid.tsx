@@ -1,0 +1,1 @@
+export { FirstAidScreen as default } from '@/components/first-aid/first-aid-screen';

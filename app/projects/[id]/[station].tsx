@@ -1,0 +1,1 @@
+export { StationScreen as default } from '@/components/station/station-screen';

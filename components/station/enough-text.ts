@@ -1,0 +1,80 @@
+import { isFull } from '@/components/station/pick-lane';
+import { countItem, itemKind, itemMadeWord } from '@/components/steps/item-words';
+import type { PlanStep } from '@/shared/model/plan';
+import type { LaneProgress, StepProgress } from '@/shared/model/tally';
+import { unitWord } from '@/components/steps/messages';
+
+/** More lanes than this are not named one by one. */
+const NAMED_LANES = 3;
+
+/**
+ * What the pieces on hand allow at a step, in words; null when it starts from cloth or is done.
+ *
+ * @param lane the lane counted in now
+ * @example "Enough for 20 pairs A+C and 19 D+E"
+ */
+export function enoughText(step: StepProgress, lane: LaneProgress | null): string | null {
+  if (step.toGo === 0) return null;
+  const open = step.lanes.filter((each) => !isFull(each) && each.possible !== null);
+  if (open.length === 0) return null;
+  if (open.every((each) => allowed(each) === 0)) return waitingText(step);
+  if (step.lanes.length === 1 || open.length === 1) {
+    const only = open[0];
+    return only ? onHandText(only, step.lanes.length > 1) : null;
+  }
+  if (open.length > NAMED_LANES) return lane && !isFull(lane) ? onHandText(lane, true) : null;
+  const parts = open.map((each, index) => {
+    const count = allowed(each);
+    return index === 0
+      ? `${count} ${unitWord(step.role, count)} ${laneLetters(each)}`
+      : `${count} ${laneLetters(each)}`;
+  });
+  return `Enough for ${joinWords(parts)}`;
+}
+
+/** "Waiting for 4 turned tips in A": what a step lacks. */
+export function waitingText(step: StepProgress): string {
+  const missing = step.waitingFor.map(({ item, missing: count }) =>
+    countItem(item, Math.ceil(count)),
+  );
+  if (missing.length === 0) return 'Nothing on hand yet';
+  return `Waiting for ${joinWords(missing.slice(0, NAMED_LANES))}`;
+}
+
+/** "2 more than were cut. Count the piles again?"; null while the counts agree. */
+export function outrunText(progress: StepProgress, step: PlanStep): string | null {
+  if (progress.outrun <= 0) return null;
+  const input = Object.keys(step.lanes[0]?.consumes ?? {}).find(
+    (item) => itemKind(item) !== 'cloth',
+  );
+  const word = input === undefined ? 'made' : itemMadeWord(input);
+  return `${progress.outrun} more than were ${word}. Count the piles again?`;
+}
+
+/** The letters of what a lane makes: "A+C". */
+export function laneLetters(lane: LaneProgress): string {
+  return lettersMade(lane.lane.makes);
+}
+
+/** The fabric letters of the items that a tap makes, in order: "A+C", "ABCDE" for a stack. */
+export function lettersMade(makes: Record<string, number>): string {
+  const letters = Object.keys(makes).map((item) => item.split(':')[1] ?? '');
+  return letters.filter((each) => each !== '').join('');
+}
+
+/** "a, b and c". */
+export function joinWords(parts: readonly string[]): string {
+  if (parts.length < 2) return parts.join('');
+  return `${parts.slice(0, -1).join(', ')} and ${parts.at(-1)}`;
+}
+
+function onHandText(lane: LaneProgress, named: boolean): string {
+  const more = `Enough on hand for ${allowed(lane) * lane.perTap} more`;
+  const letters = laneLetters(lane);
+  return named && letters !== '' ? `${more} ${letters}` : more;
+}
+
+/** Taps that may follow now: what is on hand, at most what the lane still needs. */
+function allowed(lane: LaneProgress): number {
+  return Math.min(lane.possible ?? 0, Math.max(0, lane.lane.target - lane.done));
+}
