@@ -30,6 +30,7 @@ export async function startServer(config: Config): Promise<RunningServer> {
   const { ok: connected } = await connect(db, config);
   const server = await listen(createApp({ ...config, db }), config.port);
   const waiting = new AbortController();
+  // a migration that fails then is caught by nobody and ends the process, as at the start
   const background = connected
     ? Promise.resolve()
     : connectWhenBack(db, config, { everyMs: RETRY_EVERY_MS, signal: waiting.signal });

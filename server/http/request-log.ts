@@ -27,6 +27,11 @@ function routeOf(request: Request): string | null {
   return typeof path === 'string' ? path : null;
 }
 
+const withRoute = (request: Request, _response: unknown, line: object) => ({
+  ...line,
+  route: routeOf(request),
+});
+
 /** One line a request, with an id that the answer carries too, and no personal data. */
 export function requestLog({ level, destination }: RequestLogOptions): RequestHandler {
   const options = { level, base: null };
@@ -43,7 +48,10 @@ export function requestLog({ level, destination }: RequestLogOptions): RequestHa
       response.setHeader('X-Request-Id', id);
       return id;
     },
-    customProps: (request) => ({ route: routeOf(request) }),
+    // at the end, when the route is known
+    customSuccessObject: withRoute,
+    customErrorObject: (request, response, _error, line: object) =>
+      withRoute(request, response, line),
     customLogLevel: (_request, response, error) => {
       return error || response.statusCode >= 500 ? 'error' : 'info';
     },

@@ -1,7 +1,6 @@
 import { Check, Column, CreateDateColumn, Entity, Index, PrimaryColumn } from 'typeorm';
 
-export const ROLES = ['member', 'teacher', 'admin'] as const;
-export type Role = (typeof ROLES)[number];
+export type Role = 'member' | 'teacher' | 'admin';
 
 /** A person with an account. The id is a UUIDv7 made by the app, never by the database. */
 @Entity({ name: 'app_user' })

@@ -11,8 +11,7 @@ import {
 
 import { AppUser } from './app-user';
 
-export const SCOPE_KINDS = ['project', 'own', 'class'] as const;
-export type ScopeKind = (typeof SCOPE_KINDS)[number];
+export type ScopeKind = 'project' | 'own' | 'class';
 
 /**
  * The unit of rights, ordering and paging: a project, a person's own things, or a class.

@@ -8,7 +8,7 @@ import { limitRate } from '../../http/rate-limits';
 import { planText } from './service';
 
 /** The largest request that is read, in bytes. */
-export const MOST_REQUEST_BYTES = 32 * 1024;
+const MOST_REQUEST_BYTES = 32 * 1024;
 
 /** Open to everyone, needs no database, and therefore has a limit of its own. */
 export function plansRoutes(perMinute: number): Router {

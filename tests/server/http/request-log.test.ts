@@ -23,9 +23,10 @@ function openApp() {
 }
 
 it('writes the method, the pattern of the route, the status and the time taken', async () => {
-  const { app, parsed } = openApp();
+  const { app, lines, parsed } = openApp();
   const { headers } = await request(app).get('/api/people/wilmot').expect(200);
   expect(parsed()).toHaveLength(1);
+  expect(lines[0]?.match(/"route"/g)).toHaveLength(1);
   expect(parsed()[0]).toMatchObject({
     req: { id: headers['x-request-id'], method: 'GET' },
     res: { status: 200 },
