@@ -1,11 +1,12 @@
 // npm start: all set-up, then Matside on 127.0.0.1 until Ctrl-C.
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
 import { buildServer, buildWeb } from './setup/builds.mjs';
 import { openDatabase } from './setup/database.mjs';
 import { main } from './setup/main.mjs';
 import { installPackages } from './setup/packages.mjs';
-import { ROOT } from './setup/paths.mjs';
+import { DATA, ROOT } from './setup/paths.mjs';
 import { findFreePort, isFree } from './setup/ports.mjs';
 import { run } from './setup/run.mjs';
 import { claimStart, noteAddress } from './setup/running.mjs';
@@ -24,10 +25,7 @@ async function start() {
   const server = await buildServer();
   say('Starting the database …');
   const env = { ...(await openDatabase()), WEB_DIST: web };
-  await run(process.execPath, [path.join(server, 'server/seed.js')], {
-    cwd: ROOT,
-    env: { ...process.env, ...env },
-  });
+  await migrateAndSeed(server, env);
   const port = await choosePort();
   const { ended } = await startServer(server, port, env);
   const url = `http://127.0.0.1:${port}`;
@@ -39,6 +37,17 @@ No sign-in yet: open the address and choose Open the example.
 Ctrl-C stops the server and its database; what you saved stays.`);
   const code = await ended;
   throw new SetupError(`The server ended by itself (${code}).`);
+}
+
+/** Once for each server build and database: the stamp lies beside the database, and goes with it. */
+async function migrateAndSeed(server, env) {
+  const stamp = path.join(DATA, 'postgres', 'prepared-by');
+  if (existsSync(stamp) && readFileSync(stamp, 'utf8') === server) return;
+  await run(process.execPath, [path.join(server, 'server/seed.js')], {
+    cwd: ROOT,
+    env: { ...process.env, ...env },
+  });
+  writeFileSync(stamp, server);
 }
 
 async function choosePort() {

@@ -1,15 +1,16 @@
-import { createHash, randomBytes } from 'node:crypto';
+import { randomBytes } from 'node:crypto';
 import { chownSync, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
+import { clusterHome } from './cluster-home.mjs';
 import { livingLeases, releaseLease, takeLease } from './leases.mjs';
 import { withLock } from './lock.mjs';
 import { DATA } from './paths.mjs';
 import { findFreePort } from './ports.mjs';
 import { bringPostgres } from './postgres-programs.mjs';
-import { canEnter, postgresUser } from './run-as.mjs';
+import { postgresUser } from './run-as.mjs';
 import { run } from './run.mjs';
-import { say, SetupError } from './say.mjs';
+import { SetupError } from './say.mjs';
 import { onShutdown } from './shutdown.mjs';
 
 export const SUPERUSER = 'matside_superuser';
@@ -60,28 +61,17 @@ function leave(cluster, lock, users) {
 
 async function locate(name) {
   const folder = path.join(DATA, name);
-  mkdirSync(folder, { recursive: true });
+  const programs = await bringPostgres(); // makes the user too, where Debian installs it
   const user = postgresUser();
-  const home = canEnter(user, folder) ? folder : elsewhere(folder);
+  const home = clusterHome(folder, user);
   return {
     folder,
     user,
     home,
     data: path.join(home, 'cluster'),
-    passwordFile: path.join(folder, 'passwords.json'),
-    programs: await bringPostgres(),
+    passwordFile: path.join(home, 'passwords.json'),
+    programs,
   };
-}
-
-/** For root whose clone lies in a folder closed to the `postgres` user, such as /root. */
-function elsewhere(folder) {
-  const key = createHash('sha256').update(folder).digest('hex').slice(0, 12);
-  const home = `/var/lib/matside/${key}`;
-  if (!existsSync(home)) say(`PostgreSQL's files go to ${home}: its user cannot enter ${folder}.`);
-  mkdirSync(home, { recursive: true });
-  writeFileSync(path.join(home, 'belongs-to'), `${folder}\n`);
-  writeFileSync(path.join(folder, 'moved-to'), `${home}\n`);
-  return home;
 }
 
 async function create(cluster) {
