@@ -12,6 +12,8 @@ import { openTcpRelay, type TcpRelay } from '../support/tcp-relay';
 const WEB_DIST = mkdtempSync(path.join(tmpdir(), 'dist-'));
 writeFileSync(path.join(WEB_DIST, 'index.html'), '<p>page</p>');
 
+jest.setTimeout(20_000); // one test waits for the server's own next try
+
 let relay: TcpRelay;
 let env: NodeJS.ProcessEnv;
 const running: RunningServer[] = [];
