@@ -1,5 +1,7 @@
 import type { Plan, PlanLane } from '../../model/plan';
 
+import { laneLetters } from './lane-letters';
+import { batchAt } from './strip-layout';
 import { toInches } from './to-inches';
 import { tumblingPieces, type TumblingPiece } from './tumbling';
 
@@ -14,9 +16,6 @@ export interface CutRun {
   done: number;
 }
 
-const lettersOf = (lane: PlanLane): string[] =>
-  Object.keys(lane.makes).map((item) => item.slice(item.indexOf(':') + 1));
-
 /**
  * The stack that a lane's next cut is in. A full lane shows its last stack, all of it cut.
  *
@@ -24,20 +23,25 @@ const lettersOf = (lane: PlanLane): string[] =>
  * @param done taps of that lane, each one cut through all layers
  */
 export function cutRun(plan: Plan, lane: PlanLane | null, done: number): CutRun {
-  const made = lane ? lettersOf(lane) : [];
-  const stack =
-    plan.stacks.find(({ layers }) => made.length > 0 && made.every((l) => layers.includes(l))) ??
-    plan.stacks[0];
-  const layers = stack?.layers.filter((l) => made.length === 0 || made.includes(l)) ?? [];
-  const each = Math.max(1, stack?.cutsEach ?? 1);
-  const full = lane !== null && done >= lane.target && lane.target > 0;
-  const startsAt = full ? Math.floor((lane.target - 1) / each) * each : done - (done % each);
-  const count = lane ? Math.max(1, Math.min(each, lane.target - startsAt)) : each;
-  return {
-    layers,
-    ...runOf(plan, layers, count),
-    done: full ? count : done % each,
-  };
+  const { layers, each } = stackOf(plan, lane);
+  const batch = lane ? batchAt(done, lane.target, each) : { done: 0, count: each };
+  return { layers, ...runOf(plan, layers, batch.count), done: batch.done };
+}
+
+/** The stack that a lane builds, not cut yet. */
+export function stackRun(plan: Plan, lane: PlanLane | null): CutRun {
+  const { layers, each } = stackOf(plan, lane);
+  return { layers, ...runOf(plan, layers, each), done: 0 };
+}
+
+/** A lane opened to recut one fabric has that layer alone. */
+function stackOf(plan: Plan, lane: PlanLane | null): { layers: string[]; each: number } {
+  const named = laneLetters(lane);
+  const holds = (layers: readonly string[]) => named.every((letter) => layers.includes(letter));
+  const stack = plan.stacks.find(({ layers }) => holds(layers)) ?? plan.stacks[0];
+  const layers = stack?.layers ?? [];
+  const own = named.length > 0 ? layers.filter((letter) => named.includes(letter)) : layers;
+  return { layers: own, each: Math.max(1, stack?.cutsEach ?? 1) };
 }
 
 function runOf(plan: Plan, layers: readonly string[], count: number) {

@@ -23,13 +23,3 @@ export function letterAt(shape: RingShape): Point {
 
 /** The widest letter that a wedge has room for, in inches. */
 export const letterRoom = (shape: RingShape): number => finishedHalf(shape, letterAt(shape)[0]) * 2;
-
-/** The seam before wedge `index`: from the hole to the two shoulders that meet. */
-export function seamLine(shape: RingShape, index: number): Point[] {
-  const scale = 1 / Math.cos(shape.halfAngleRad);
-  const along: Point[] = [
-    [shape.narrowIn * scale, 0],
-    [shape.shoulderIn * scale, 0],
-  ];
-  return placeAtAngle(along, 2 * index * shape.halfAngleRad);
-}

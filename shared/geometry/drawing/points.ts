@@ -40,3 +40,12 @@ export function pathOf(points: readonly Point[], closed = true): string {
   const corners = points.map(([x, y]) => `${figure(x)} ${figure(y)}`);
   return `M${corners.join('L')}${closed ? 'Z' : ''}`;
 }
+
+/** Two places side by side: the left one takes `share` of the width. */
+export function twoPanels(box: Box, share = 0.5): [Box, Box] {
+  const left = box.width * share;
+  return [
+    { ...box, width: left },
+    { ...box, x: box.x + left, width: box.width - left },
+  ];
+}

@@ -1,6 +1,6 @@
 import type { Plan } from '../../model/plan';
 
-import { findUnit, plateLetters } from './find-unit';
+import { plateLetters } from './find-unit';
 import { applyFit, fitPoint, type Fit } from './fit';
 import { letterAt, letterRoom, placeWedge } from './place-wedge';
 import type { Point } from './points';
@@ -36,16 +36,3 @@ export function drawRing(plan: Plan, shape: RingShape, fit: Fit): DrawnWedge[] {
 /** The farthest point of the finished ring from its centre, inches: a flat tip's corners. */
 export const ringExtent = (shape: RingShape): number =>
   shape.tip === 'flat' ? shape.reachIn / Math.cos(shape.halfAngleRad) : shape.reachIn;
-
-/** The two sides of every seam between the units of a ring or part: indexes of its wedges. */
-export function joinsOf(plan: Plan, kind: 'quarter' | 'half' | 'ring', lane: Parameters<typeof findUnit>[2]) {
-  const unit = findUnit(plan, kind, lane);
-  const parts = unit && unit.parts.length > 0 ? unit.parts : unit ? [unit] : [];
-  let index = 0;
-  const starts = parts.map((part) => {
-    const start = index;
-    index += part.letters.length;
-    return start;
-  });
-  return { letters: unit?.letters ?? [], starts, parts: parts.map((part) => part.letters) };
-}

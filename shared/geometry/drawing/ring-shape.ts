@@ -8,6 +8,8 @@ export interface RingShape {
   /** half of a wedge's angle: π/n */
   halfAngleRad: number;
   seamIn: number;
+  /** what a tip takes of the wide end: its seam, or what is turned under */
+  tipTurnIn: number;
   /** the raw narrow and wide edges of a cut wedge */
   narrowIn: number;
   wideIn: number;
@@ -24,6 +26,7 @@ export interface RingShape {
 /** The numbers of a plan that its drawings need. */
 export function ringShape(plan: Plan): RingShape {
   const { request, geometry } = plan;
+  const { tip } = request;
   const { wedge, ring, circle } = geometry;
   const narrowIn = toInches(wedge.rawNarrowAt);
   const reachIn = toInches(ring.reach);
@@ -32,11 +35,12 @@ export function ringShape(plan: Plan): RingShape {
     wedges: request.wedges,
     halfAngleRad: Math.PI / request.wedges,
     seamIn: toInches(request.seam),
+    tipTurnIn: toInches(tip.shape === 'pointed' ? tip.seam : tip.turnUnder),
     narrowIn,
     wideIn: toInches(wedge.rawWideAt),
     holeIn: narrowIn + turned,
     reachIn,
-    tip: request.tip.shape,
+    tip: tip.shape,
     shoulderIn: ring.shoulderAt === null ? reachIn : toInches(ring.shoulderAt),
     circleIn: circle === null ? null : toInches(circle.finishedRadius),
   };

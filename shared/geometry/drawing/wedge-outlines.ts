@@ -1,6 +1,6 @@
 import { cutHalfWidth } from '../cut-half-width';
 import { finishedHalfWidth } from '../finished-half-width';
-import type { Point } from './points';
+import { turnPoints, type Point } from './points';
 import type { RingShape } from './ring-shape';
 
 // Outlines of one wedge: x from the plate's centre along its axis, y across, inches.
@@ -115,3 +115,27 @@ export function seamAllowance(shape: RingShape, side: 1 | -1): Point[] {
     [near, side * rawHalf(shape, near)],
   ];
 }
+
+/** The inner edge of what a rounded or flat tip turns under, as the back shows it. */
+export function templateEdge(shape: RingShape): Point[] {
+  const half = finishedHalf(shape, shape.shoulderIn);
+  if (shape.tip === 'rounded') {
+    return halfCircle(shape.shoulderIn, Math.max(half * 0.2, half - shape.tipTurnIn));
+  }
+  const inner = shape.reachIn - shape.tipTurnIn;
+  const wide = rawHalf(shape, inner);
+  return [
+    [inner, -wide],
+    [inner, wide],
+  ];
+}
+
+/** The cloth turned to the back along a rounded or flat tip; its right side shows there. */
+export function turnedBand(shape: RingShape): Point[] {
+  const outer = preparedWedge(shape).slice(1, -1);
+  return [...outer, ...templateEdge(shape).reverse()];
+}
+
+/** A wedge's outline turned so that its raw side `after` lies level below, its seam on y = 0. */
+export const levelWedge = (shape: RingShape): Point[] =>
+  turnPoints(preparedWedge(shape), -shape.halfAngleRad);
