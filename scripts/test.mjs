@@ -10,6 +10,7 @@ import { openRunDatabase } from './setup/database.mjs';
 import { main } from './setup/main.mjs';
 import { installPackages } from './setup/packages.mjs';
 import { CACHE, ROOT } from './setup/paths.mjs';
+import { findFreePort } from './setup/ports.mjs';
 import { say } from './setup/say.mjs';
 import { onShutdown, shutDown } from './setup/shutdown.mjs';
 
@@ -41,7 +42,9 @@ function wants(project) {
 
 async function prepareBrowserTests() {
   const CHROMIUM = await bringChromium();
-  return { CHROMIUM, WEB_DIST: await buildWeb(), SERVER_DIST: await buildServer() };
+  const [WEB_DIST, SERVER_DIST] = [await buildWeb(), await buildServer()];
+  const E2E_PORT = String(await findFreePort(3470, 8)); // and one for each of jest's workers
+  return { CHROMIUM, WEB_DIST, SERVER_DIST, E2E_PORT };
 }
 
 function jest(env) {
