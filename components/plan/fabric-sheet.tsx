@@ -1,6 +1,7 @@
 import { StyleSheet, View } from 'react-native';
 
 import { ClothChoice } from '@/components/plan/cloth-choice';
+import type { DraftFabric } from '@/components/plan/draft';
 import {
   buyFabric,
   changeFabric,
@@ -27,48 +28,61 @@ interface FabricSheetProps {
 
 /** One cloth opened: its name, its colour, how its print runs; changes show at once. */
 export function FabricSheet({ setup, id, onClose }: FabricSheetProps) {
+  const at = listFabrics(setup.draft).findIndex((candidate) => candidate.id === id);
+  const letter = letterFabrics(setup.draft)[at]?.letter ?? '';
+  return (
+    <Sheet open={at >= 0} title={`Fabric ${letter}`} onClose={onClose} testID="fabric-sheet">
+      {at >= 0 ? <FabricDetails setup={setup} at={at} onClose={onClose} /> : null}
+    </Sheet>
+  );
+}
+
+interface FabricDetailsProps {
+  setup: Setup;
+  at: number;
+  onClose: () => void;
+}
+
+function FabricDetails({ setup, at, onClose }: FabricDetailsProps) {
   const { draft, change } = setup;
-  const toast = useToast();
-  const at = listFabrics(draft).findIndex((candidate) => candidate.id === id);
   const fabric = listFabrics(draft)[at];
   const lettered = letterFabrics(draft)[at];
   if (!fabric || !lettered) return null;
-  const { letter, role } = lettered;
   const patch = (part: Parameters<typeof changeFabric>[2]) =>
     change((old) => changeFabric(old, fabric.id, part));
-  const remove = () => {
-    onClose();
-    change((old) => removeFabric(old, fabric.id));
-    toast.show({
-      text: `${fabric.name || letter} removed`,
-      action: {
-        label: 'Put back',
-        onPress: () => change((old) => putFabricBack(old, fabric, at)),
-      },
-    });
-  };
   return (
-    <Sheet open title={`Fabric ${letter}`} onClose={onClose} testID="fabric-sheet">
-      <View style={styles.fields}>
-        <Field
-          label="Name"
-          value={fabric.name}
-          onChangeText={(name) => patch({ name })}
-          error={setup.errors[`fabric:${at}`]}
-          maxLength={60}
-          testID="fabric-name"
+    <View style={styles.fields}>
+      <Field
+        label="Name"
+        value={fabric.name}
+        onChangeText={(name) => patch({ name })}
+        error={setup.errors[`fabric:${at}`]}
+        maxLength={60}
+        testID="fabric-name"
+      />
+      <ClothChoice
+        fabric={lettered}
+        onChoose={(cloth, known) => patch(known ? cloth : { colour: cloth.colour })}
+      />
+      <Toggle
+        label="One-way print"
+        hint="Never turned, so fewer wedges a strip"
+        value={fabric.oneWay}
+        onChange={(oneWay) => patch({ oneWay })}
+        testID="one-way"
+      />
+      {fabric.buyYards === undefined ? null : (
+        <Note
+          tone="info"
+          title={`You buy ${formatYards(fabric.buyYards)}.`}
+          action={{
+            label: 'Buy what is needed',
+            onPress: () => change((old) => buyFabric(old, lettered.letter, null)),
+          }}
         />
-        <ClothChoice
-          fabric={lettered}
-          onChoose={(cloth, known) => patch(known ? cloth : { colour: cloth.colour })}
-        />
-        <Toggle
-          label="One-way print"
-          hint="Never turned, so fewer wedges a strip"
-          value={fabric.oneWay}
-          onChange={(oneWay) => patch({ oneWay })}
-        />
-        {role === 'wedge' ? (
+      )}
+      {lettered.role === 'wedge' ? (
+        <>
           <Toggle
             label="Dominant"
             hint="In the middle of each round, toward the corners"
@@ -76,28 +90,39 @@ export function FabricSheet({ setup, id, onClose }: FabricSheetProps) {
             onChange={(dominant) => patch({ dominant })}
             testID="dominant"
           />
-        ) : null}
-        {fabric.buyYards === undefined ? null : (
-          <Note
-            tone="info"
-            title={`You buy ${formatYards(fabric.buyYards)}.`}
-            action={{
-              label: 'Buy what is needed',
-              onPress: () => change((old) => buyFabric(old, letter, null)),
-            }}
-          />
-        )}
-        {role === 'wedge' ? (
-          <Button
-            label="Remove this fabric"
-            icon="trash"
-            kind="second"
-            onPress={remove}
-            testID="remove-fabric"
-          />
-        ) : null}
-      </View>
-    </Sheet>
+          <RemoveFabric setup={setup} fabric={fabric} at={at} onClose={onClose} />
+        </>
+      ) : null}
+    </View>
+  );
+}
+
+function RemoveFabric({
+  setup,
+  fabric,
+  at,
+  onClose,
+}: FabricDetailsProps & { fabric: DraftFabric }) {
+  const { show } = useToast();
+  const remove = () => {
+    onClose();
+    setup.change((draft) => removeFabric(draft, fabric.id));
+    show({
+      text: `${fabric.name} removed`,
+      action: {
+        label: 'Put back',
+        onPress: () => setup.change((draft) => putFabricBack(draft, fabric, at)),
+      },
+    });
+  };
+  return (
+    <Button
+      label="Remove this fabric"
+      icon="trash"
+      kind="second"
+      onPress={remove}
+      testID="remove-fabric"
+    />
   );
 }
 

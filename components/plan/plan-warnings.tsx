@@ -1,6 +1,6 @@
 import { StyleSheet, View } from 'react-native';
 
-import { warningText } from '@/components/plan/messages';
+import { groupWarnings } from '@/components/plan/group-warnings';
 import { Note } from '@/components/ui/note';
 import { space } from '@/components/ui/theme';
 import type { Plan } from '@/shared/model/plan';
@@ -8,7 +8,7 @@ import type { Plan } from '@/shared/model/plan';
 interface PlanWarningsProps {
   plan: Plan;
   /** takes the offer of a warning; without it the offers are only told */
-  onBuy?: (letter: string, yards: string) => void;
+  onBuy?: (letters: readonly string[], yards: string) => void;
 }
 
 /** What to watch, each with the one thing to do about it. */
@@ -16,11 +16,10 @@ export function PlanWarnings({ plan, onBuy }: PlanWarningsProps) {
   if (plan.warnings.length === 0) return null;
   return (
     <View style={styles.notes} role="list" aria-label="Warnings">
-      {plan.warnings.map((warning, at) => {
-        const { title, text, offer } = warningText(warning, plan);
-        const take = offer && onBuy ? () => onBuy(offer.letter, offer.buyYards) : null;
+      {groupWarnings(plan).map(({ title, text, offer }) => {
+        const take = offer && onBuy ? () => onBuy(offer.letters, offer.buyYards) : null;
         return (
-          <View role="listitem" key={`${warning.code} ${at}`}>
+          <View role="listitem" key={title}>
             <Note
               tone="caution"
               title={title}

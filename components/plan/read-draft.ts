@@ -91,18 +91,20 @@ function dropStaleOffers(request: PlanRequest, errors: readonly PlanRefusal[]): 
   return { ...request, fabrics };
 }
 
+/** One text a field: the first of its refusals. */
+function writeErrors(refusals: readonly PlanRefusal[]): FieldErrors {
+  const errors: FieldErrors = {};
+  for (const refusal of refusals) errors[pointerToField(refusal.pointer)] ??= refusalText(refusal);
+  return errors;
+}
+
 function planRequest(request: PlanRequest): DraftReading {
   const made = makePlan(request);
   if (made.ok) return { ok: true, value: { request, plan: made.value } };
   const current = dropStaleOffers(request, made.errors);
   const again = makePlan(current);
   if (again.ok) return { ok: true, value: { request: current, plan: again.value } };
-  const errors: FieldErrors = {};
-  for (const refusal of again.errors) {
-    const field = pointerToField(refusal.pointer);
-    errors[field] ??= refusalText(refusal);
-  }
-  return { ok: false, kind: 'refused', errors };
+  return { ok: false, kind: 'refused', errors: writeErrors(again.errors) };
 }
 
 /** The request behind a draft; null when a size cannot be read. It may still be refused. */
@@ -112,10 +114,24 @@ export function requestOfDraft(draft: SetupDraft, habits: CuttingHabits): PlanRe
   return defaultRequest(chooseRing(draft, sizes, habits));
 }
 
+/** Refusals that say something of their own field alone, whatever the others are. */
+const OF_ONE_FIELD: readonly PlanRefusal['code'][] = [
+  'not-positive',
+  'below-least',
+  'above-most',
+  'too-few-fabrics',
+  'too-many-fabrics',
+  'narrow-edge-crossed',
+  'shrink-too-large',
+];
+
 /** Plans a draft, or says beside which field what is wrong and what works. */
 export function readDraft(draft: SetupDraft, habits: CuttingHabits): DraftReading {
-  const errors = { ...readSizes(draft).errors, ...readNames(letterFabrics(draft)) };
-  const request = requestOfDraft(draft, habits);
-  if (!request || Object.keys(errors).length > 0) return { ok: false, kind: 'refused', errors };
-  return planRequest(request);
+  const { sizes, errors: unreadable } = readSizes(draft);
+  const typed = { ...unreadable, ...readNames(letterFabrics(draft)) };
+  const request = defaultRequest(chooseRing(draft, sizes, habits));
+  if (Object.keys(typed).length === 0) return planRequest(request);
+  const made = makePlan(request);
+  const others = made.ok ? [] : made.errors.filter(({ code }) => OF_ONE_FIELD.includes(code));
+  return { ok: false, kind: 'refused', errors: { ...writeErrors(others), ...typed } };
 }
