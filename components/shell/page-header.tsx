@@ -64,5 +64,5 @@ const styles = StyleSheet.create({
     columnGap: 12,
     rowGap: 6,
   },
-  title: { flexShrink: 1, borderRadius: 6 },
+  title: { flexShrink: 1, borderRadius: 6, marginHorizontal: -6, paddingHorizontal: 6 },
 });

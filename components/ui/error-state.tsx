@@ -70,5 +70,5 @@ const styles = StyleSheet.create({
   },
   title: { fontSize: 25, lineHeight: 30, marginTop: 16 },
   text: { fontSize: 17, lineHeight: 23, marginTop: 9, marginBottom: 20 },
-  why: { alignSelf: 'flex-start', marginTop: 8 },
+  why: { alignSelf: 'flex-start', marginTop: 8, marginLeft: -14 },
 });

@@ -1,5 +1,5 @@
-import { type ReactNode, useEffect, useRef } from 'react';
-import { Modal, ScrollView, StyleSheet, type Text, View, type ViewStyle } from 'react-native';
+import type { ReactNode } from 'react';
+import { Modal, ScrollView, StyleSheet, View, type ViewStyle } from 'react-native';
 
 import { scrim, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
@@ -27,16 +27,13 @@ function swallow(event: KeyEvent): void {
 }
 
 /**
- * What dialogs and sheets share: a scrim, focus on the question first, Tab kept inside, Escape and
- * the scrim close, and focus goes back to where it was (the last three: react-native-web's Modal).
+ * What dialogs and sheets share: a scrim that closes, and what react-native-web's Modal does: focus
+ * on the first thing that takes it, which is the question; Tab kept inside; Escape closes; focus
+ * goes back to where it was.
  */
 export function Overlay(props: OverlayProps) {
   const { open, title, titleId, onClose, children } = props;
   const { name, color } = useTheme();
-  const question = useRef<Text>(null);
-  useEffect(() => {
-    if (open) question.current?.focus();
-  }, [open]);
   const shadow = name === 'day' ? SHADOW : null;
   return (
     <Modal
@@ -66,7 +63,6 @@ export function Overlay(props: OverlayProps) {
                 heading={2}
                 id={titleId}
                 tabIndex={-1}
-                ref={question}
                 style={styles.title}
               >
                 {title}
@@ -89,5 +85,11 @@ const styles = StyleSheet.create({
   scrim: { position: 'absolute', top: 0, right: 0, bottom: 0, left: 0 },
   box: { width: '100%', maxHeight: '92%', borderWidth: 1, overflow: 'hidden' },
   inside: { paddingHorizontal: 22, paddingTop: 24, paddingBottom: 20 },
-  title: { fontSize: 24, lineHeight: 29, borderRadius: 6 },
+  title: {
+    fontSize: 24,
+    lineHeight: 29,
+    borderRadius: 6,
+    marginHorizontal: -6,
+    paddingHorizontal: 6,
+  },
 });

@@ -3,6 +3,7 @@ import { StyleSheet, View } from 'react-native';
 import { rulerMarks } from '@/components/ui/ruler-marks';
 import { useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
+import { useTextScale } from '@/components/ui/use-text-scale';
 import type { Station } from '@/shared/model/codes';
 
 interface RulerBarProps {
@@ -23,10 +24,11 @@ interface RulerBarProps {
 export function RulerBar(props: RulerBarProps) {
   const { value, of, tick, longTick, station = 'table', onFill = false, silent = false } = props;
   const theme = useTheme();
+  const scale = useTextScale();
   const dye = theme.station(station);
   const ink = onFill ? dye.onFill : dye.ink;
   const share = of > 0 ? Math.min(1, Math.max(0, value / of)) : 0;
-  const marks = rulerMarks(of, tick, longTick);
+  const marks = rulerMarks(of, tick, longTick, Math.floor(7 / scale));
   const named = { role: 'img' as const, 'aria-label': `${value} of ${of}` };
   return (
     <View {...(silent ? { 'aria-hidden': true } : named)}>
@@ -45,7 +47,7 @@ export function RulerBar(props: RulerBarProps) {
             />
           ))}
       </View>
-      <View style={styles.numbers} aria-hidden>
+      <View style={[styles.numbers, { minHeight: 20 * scale }]} aria-hidden>
         {marks.map(({ at, label }) =>
           label === null ? null : (
             <View key={at} style={[styles.number, numberPlace(at / of)]}>
@@ -72,6 +74,6 @@ const styles = StyleSheet.create({
   fill: { height: '100%' },
   tick: { position: 'absolute', bottom: 0, height: 6, width: 1.25, marginLeft: -0.6 },
   long: { height: '100%', width: 1.5, marginLeft: -0.75 },
-  numbers: { minHeight: 20, marginTop: 4 },
+  numbers: { marginTop: 4 },
   number: { position: 'absolute', width: 60 },
 });

@@ -6,7 +6,6 @@ export interface RulerMark {
 }
 
 const MOST_TICKS = 48;
-const MOST_NUMBERS = 7;
 
 /**
  * Ticks of a ruler bar from 0 to `of`: one a cut, a long one with its number a stack. Where they
@@ -15,10 +14,16 @@ const MOST_NUMBERS = 7;
  * @param of target, ≥ 1
  * @param tick units between short ticks, > 0
  * @param longTick units between long ticks; without it each tick is long
+ * @param mostNumbers about how many numbers there is room for
  */
-export function rulerMarks(of: number, tick: number, longTick = tick): RulerMark[] {
+export function rulerMarks(
+  of: number,
+  tick: number,
+  longTick = tick,
+  mostNumbers = 7,
+): RulerMark[] {
   if (!(of > 0) || !(tick > 0) || !(longTick > 0)) return [];
-  const longStep = longTick * Math.ceil(of / longTick / MOST_NUMBERS);
+  const longStep = longTick * Math.ceil(of / longTick / mostNumbers);
   const shortStep = of / tick > MOST_TICKS ? longStep : tick;
   const places = new Set([0, of]);
   for (let at = shortStep; at < of; at += shortStep) places.add(at);

@@ -5,6 +5,7 @@ import { STATION_NAMES } from '@/components/ui/stations';
 import { border, radius, size, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
+import { useTextScale } from '@/components/ui/use-text-scale';
 import { pressable } from '@/components/ui/web-only';
 import type { Station } from '@/shared/model/codes';
 
@@ -48,6 +49,7 @@ interface TabProps {
 
 function Tab({ station, on, count, onPress }: TabProps) {
   const theme = useTheme();
+  const scale = useTextScale();
   const dye = theme.station(station);
   const name = STATION_NAMES[station];
   return (
@@ -58,7 +60,11 @@ function Tab({ station, on, count, onPress }: TabProps) {
       aria-label={count > 0 && !on ? `${name}, ${count} ready` : name}
       testID={`station-${station}`}
       onPress={onPress}
-      style={[styles.tab, on && { backgroundColor: dye.fill, borderColor: dye.ink }]}
+      style={[
+        styles.tab,
+        { flexBasis: 54 * scale },
+        on && { backgroundColor: dye.fill, borderColor: dye.ink },
+      ]}
     >
       <Icon name={station} size={22} color={on ? dye.onFill : dye.ink} />
       <Txt
@@ -70,7 +76,10 @@ function Tab({ station, on, count, onPress }: TabProps) {
         {name}
       </Txt>
       {count > 0 && !on && (
-        <View style={[styles.count, { backgroundColor: theme.color.card, borderColor: dye.ink }]}>
+        <View
+          aria-hidden
+          style={[styles.count, { backgroundColor: theme.color.card, borderColor: dye.ink }]}
+        >
           <Txt kind="header" color={dye.ink} style={styles.number}>
             {count}
           </Txt>
@@ -81,9 +90,15 @@ function Tab({ station, on, count, onPress }: TabProps) {
 }
 
 const styles = StyleSheet.create({
-  bar: { flexDirection: 'row', gap: 4, padding: 4, borderRadius: radius.switcher },
+  bar: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    gap: 4,
+    padding: 4,
+    borderRadius: radius.switcher,
+  },
   tab: {
-    flex: 1,
+    flexGrow: 1,
     minWidth: size.touchMin,
     minHeight: size.touchMin,
     borderRadius: 14,
@@ -97,7 +112,7 @@ const styles = StyleSheet.create({
   count: {
     position: 'absolute',
     top: 2,
-    left: '52%',
+    right: 4,
     minWidth: 19,
     minHeight: 19,
     paddingHorizontal: 4,

@@ -69,6 +69,7 @@ export function Stepper(props: StepperProps) {
             {unit}
           </Txt>
         ) : null}
+        {unit && scale < 1.3 ? <View style={styles.spacer} /> : null}
         <End label={`More, ${label}`} icon="plus" possible={canMore} onStep={() => onStep(1)} />
       </View>
       <FieldError id={`${id}-error`} error={error} />
@@ -126,5 +127,6 @@ const styles = StyleSheet.create({
     borderRadius: 8,
   },
   besideUnit: { flex: 3, textAlign: 'right' },
-  unit: { flex: 2, paddingLeft: 5, fontSize: 20, lineHeight: 26 },
+  unit: { paddingLeft: 5, fontSize: 20, lineHeight: 26 },
+  spacer: { flex: 1 }, // keeps number and unit together in the middle
 });

@@ -1,6 +1,6 @@
 import { useId } from 'react';
 import { View } from 'react-native';
-import Svg, { Circle, Defs, Path, Rect, Text } from 'react-native-svg';
+import Svg, { Circle, Defs, G, Path, Rect, Text } from 'react-native-svg';
 
 import { clothOf, ClothPattern } from '@/components/ui/cloth';
 import { useTheme } from '@/components/ui/theme';
@@ -74,7 +74,9 @@ function Star({ at, color, on }: { at: number; color: string; on: string }) {
   return (
     <>
       <Circle cx={at} cy={3} r={8} fill={on} stroke={color} strokeWidth={1} />
-      <Path d={STAR} x={at} y={3} fill={color} />
+      <G x={at} y={3}>
+        <Path d={STAR} fill={color} />
+      </G>
     </>
   );
 }

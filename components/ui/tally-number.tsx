@@ -2,6 +2,7 @@ import { StyleSheet, Text, View } from 'react-native';
 
 import { font, numerals } from '@/components/ui/type';
 import { useLayout } from '@/components/ui/use-layout';
+import { useTextScale } from '@/components/ui/use-text-scale';
 import { webOnly } from '@/components/ui/web-only';
 
 const LINE = 0.78;
@@ -32,8 +33,9 @@ interface TallyNumberProps {
 /** The number of the tally. Each new one fades up 6 px (public/app.css), unless motion is off. */
 export function TallyNumber({ value, color, width, height }: TallyNumberProps) {
   const { kind } = useLayout();
+  const scale = useTextScale(); // larger words leave less height for the numeral
   const wide = kind === 'wide' || kind === 'desk';
-  const fontSize = tallySize(String(value).length, wide, width, height);
+  const fontSize = tallySize(String(value).length, wide, width, height / scale);
   return (
     <View style={styles.place} testID="tally-number">
       <Text

@@ -20,7 +20,7 @@ export function TallyTop({ station, perTap, full, locked }: TallyTopProps) {
   const ink = full ? dye.ink : dye.onFill;
   const onPill = full || theme.name === 'day' ? (full ? dye.tint : dye.fill) : theme.color.paper;
   return (
-    <View style={styles.top}>
+    <View style={styles.top} aria-hidden>
       <View style={[styles.pill, { backgroundColor: ink }]}>
         <Icon name={locked ? 'lock' : 'plus'} size={20} color={onPill} stroke={locked ? 2.4 : 3} />
         <Txt color={onPill} style={styles.pillText}>

@@ -67,7 +67,7 @@ export function TallyZone(props: TallyZoneProps) {
       >
         <MatGrid color={ink} />
         <TallyTop {...props} full={full} locked={locked} />
-        <View style={styles.middle}>
+        <View style={styles.middle} aria-hidden>
           <TallyNumber value={shown} color={ink} width={box.width} height={box.height} />
           <View style={styles.caption}>
             {full && <Icon name="check" size={26} color={ink} stroke={3} />}

@@ -23,7 +23,6 @@ export function Toggle({ label, hint, value, onChange, testID }: ToggleProps) {
       {...(testID && { testID })}
       role="switch"
       aria-checked={value}
-      aria-label={hint ? `${label}. ${hint}` : label}
       onPress={() => onChange(!value)}
       style={styles.row}
     >
