@@ -19,13 +19,10 @@ const roomLeft = async () => false; // native I/O errors name a full disk themse
 export function createLocalClient(env: LocalEnvironment): ProjectsClient {
   const box = createSnapshotBox();
   let opening: Promise<Store | null> | null = null;
-  let serial = 0;
-  let prefix = '';
 
   const open = async (): Promise<Store | null> => {
     try {
       const db = await env.open();
-      [prefix = ''] = await env.tools.newIds(1); // requests of one opening are told from another's
       const store = await openStore(db, env.tools);
       const status = { phase: 'ready', role: 'leader', storage: 'private', failure: null } as const;
       box.show({ status, projects: store.projects() });
@@ -42,7 +39,7 @@ export function createLocalClient(env: LocalEnvironment): ProjectsClient {
     const { failure } = box.get().status;
     if (!store) return { ok: false, ...(failure ?? { kind: 'failed', detail: 'not open' }) };
     try {
-      const { answer, changes } = await store.perform(`${prefix} ${(serial += 1)}`, command);
+      const { answer, changes } = await store.perform(null, command);
       box.show({ projects: applyChanges(box.get().projects, changes), status: { failure: null } });
       return answer;
     } catch (error) {

@@ -27,9 +27,10 @@ export interface Store {
    * Does a command in its turn, in one transaction. A request that was done before, by this store
    * or by an earlier opening of its file, is not done again but answered the same.
    *
+   * @param request its id, kept with it; null for a command that nobody can send again
    * @throws what SQLite throws when the transaction fails; then nothing was written
    */
-  perform(request: string, command: Command): Promise<Performed>;
+  perform(request: string | null, command: Command): Promise<Performed>;
   /** Ends after what was asked for before. */
   close(): Promise<void>;
 }
@@ -65,18 +66,26 @@ export async function openStore(db: SqlDatabase, tools: StoreTools): Promise<Sto
   };
 }
 
-async function perform(opened: Opened, request: string, command: Command): Promise<Performed> {
+async function perform(
+  opened: Opened,
+  request: string | null,
+  command: Command,
+): Promise<Performed> {
   if (command.do === 'durability') return answerWith(await readDurability(opened.db));
   if (command.do === 'saveCopy') return answerWith(await saveCopy(opened.db, opened.tools.nowMs()));
   if (opened.stale) await refresh(opened);
-  const known = opened.answers.get(request);
+  const known = request === null ? undefined : opened.answers.get(request);
   if (known) return { answer: known, changes: [] };
   return write(opened, request, command);
 }
 
 const answerWith = (text: string): Performed => ({ answer: { ok: true, text }, changes: [] });
 
-async function write(opened: Opened, request: string, command: WriteCommand): Promise<Performed> {
+async function write(
+  opened: Opened,
+  request: string | null,
+  command: WriteCommand,
+): Promise<Performed> {
   const { db, tools } = opened;
   const session = opened.state.session ?? mintSession(await tools.random16());
   const work = beginWork(opened.state, session, tools.nowMs());
@@ -87,20 +96,34 @@ async function write(opened: Opened, request: string, command: WriteCommand): Pr
   return { answer, changes: work.changes };
 }
 
-async function commit(opened: Opened, work: Work, request: string, answer: Answer): Promise<void> {
+async function commit(
+  opened: Opened,
+  work: Work,
+  request: string | null,
+  answer: Answer,
+): Promise<void> {
   const kept = sql`INSERT INTO request (id, answer, at_ms)
     VALUES (${request}, ${JSON.stringify(answer)}, ${work.nowMs})`;
   try {
-    await writeAll(opened.db, [...work.statements, kept]);
+    await writeAll(opened.db, request === null ? work.statements : [...work.statements, kept]);
   } catch (error) {
-    // Whether it reached the disk is not known: read again, and name no act twice by a new session.
-    opened.stale = true;
-    await refresh(opened).catch(() => undefined);
+    if (await hasLanded(opened, work)) return;
     throw error;
   }
   const { records, session, seqs, lastOrd, lastTallyNo, lastTimeMs } = work;
   opened.state = { records, session, seqs, lastOrd, lastTallyNo, lastTimeMs };
-  opened.answers.set(request, answer);
+  if (request !== null) opened.answers.set(request, answer);
+}
+
+/**
+ * A failed commit may have reached the disk all the same: only reading tells. The memory is read
+ * again with it, and a new session makes sure that no identity ever names two acts.
+ */
+async function hasLanded(opened: Opened, work: Work): Promise<boolean> {
+  const before = opened.state.lastOrd;
+  opened.stale = true;
+  await refresh(opened).catch(() => undefined);
+  return !opened.stale && work.lastOrd > before && opened.state.lastOrd === work.lastOrd;
 }
 
 async function refresh(opened: Opened): Promise<void> {

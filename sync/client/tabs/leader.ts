@@ -8,7 +8,7 @@ import type { OpenedDatabase, TabChannel, TabEnvironment } from './tab-environme
 
 /** The tab that owns the database. */
 export interface Leader {
-  perform(request: string, command: Command): Promise<Answer>;
+  perform(request: string | null, command: Command): Promise<Answer>;
   welcome(begins: boolean): void;
   /** Ends what was asked for before, then closes the database. */
   close(): Promise<void>;

@@ -17,7 +17,7 @@ export function openTally(work: Work, record: ProjectRecord, key: TallyKey): Tal
   return { no: work.lastTallyNo, tapPart: 0, offset: 0, ruling: null };
 }
 
-/** Writes a changed count, and the project's last place of work, and remembers both. */
+/** Writes a changed count and when it was worked at, which tells the project's last place of work. */
 export function keepCount(
   work: Work,
   record: ProjectRecord,
@@ -30,11 +30,9 @@ export function keepCount(
   const { no, tapPart, offset, ruling } = tally;
   work.statements.push(
     sql`INSERT OR REPLACE INTO view_tally
-      (tally_no, tap_part, "offset", set_session, set_seq, set_stamp_ms)
-      VALUES (${no}, ${tapPart}, ${offset}, ${ruling?.session ?? null}, ${ruling?.seq ?? null},
+      (tally_no, tap_part, "offset", worked_ms, set_session, set_seq, set_stamp_ms)
+      VALUES (${no}, ${tapPart}, ${offset}, ${written.stampMs}, ${ruling?.session ?? null}, ${ruling?.seq ?? null},
         ${ruling?.stampMs ?? null})`,
-    sql`UPDATE project SET worked_ms = ${written.stampMs}, last_step = ${key.step}
-      WHERE scope_id = ${id}`,
   );
   const { step, lane, kind } = key;
   const change: ProjectChange = {

@@ -28,9 +28,7 @@ CREATE TABLE project (
   engine TEXT NOT NULL,
   request TEXT NOT NULL,
   edits TEXT NOT NULL,
-  deleted INTEGER NOT NULL DEFAULT 0,
-  worked_ms INTEGER,
-  last_step TEXT
+  deleted INTEGER NOT NULL DEFAULT 0
 ) WITHOUT ROWID;
 CREATE TABLE bin (
   scope_id TEXT NOT NULL,
@@ -114,6 +112,7 @@ CREATE TABLE view_tally (
   tally_no INTEGER PRIMARY KEY,
   tap_part INTEGER NOT NULL,
   "offset" INTEGER NOT NULL,
+  worked_ms INTEGER NOT NULL,
   set_session TEXT,
   set_seq INTEGER,
   set_stamp_ms INTEGER

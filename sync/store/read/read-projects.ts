@@ -13,8 +13,6 @@ interface ProjectRow {
   request: string;
   edits: string;
   deleted: number;
-  worked_ms: number | null;
-  last_step: string | null;
 }
 
 /** Every project of this file, those in the bin too. */
@@ -37,8 +35,8 @@ export async function readProjects(db: SqlDatabase): Promise<ProjectRecord[]> {
           note: field.values.note,
           example: row.example === 1,
           createdAtMs: row.created_ms,
-          workedAtMs: row.worked_ms,
-          lastStepKey: row.last_step,
+          workedAtMs: count?.workedAtMs ?? null,
+          lastStepKey: count?.lastStepKey ?? null,
           request: PlanRequestSchema.parse(JSON.parse(row.request)),
           engine: row.engine,
           steps,

@@ -11,6 +11,7 @@ interface TallyRow {
   lane: string;
   kind: TallyKind;
   tap_part: number;
+  worked_ms: number;
   offset: number;
   set_session: string | null;
   set_seq: number | null;
@@ -20,13 +21,15 @@ interface ProjectCounts {
   shown: Tally[];
   tallies: Map<string, TallyRecord>;
   newest: Map<string, OwnAct>;
+  workedAtMs: number;
+  lastStepKey: string;
 }
 
 /** Every count as it was kept with each act, and what undo would take back, by project. */
 export async function readTallies(db: SqlDatabase): Promise<Map<string, ProjectCounts>> {
   const projects = new Map<string, ProjectCounts>();
   const rows = await db.all<TallyRow>(
-    `SELECT key.no, key.scope_id, key.step, key.lane, key.kind, view.tap_part, view."offset",
+    `SELECT key.no, key.scope_id, key.step, key.lane, key.kind, view.tap_part, view."offset", view.worked_ms,
       view.set_session, view.set_seq, view.set_stamp_ms
     FROM tally_key AS key JOIN view_tally AS view ON view.tally_no = key.no ORDER BY key.no`,
   );
@@ -38,9 +41,15 @@ export async function readTallies(db: SqlDatabase): Promise<Map<string, ProjectC
       shown: [],
       tallies: new Map(),
       newest: acts.get(row.scope_id) ?? new Map(),
+      workedAtMs: 0,
+      lastStepKey: step,
     };
     projects.set(row.scope_id, counts);
     counts.shown.push({ step, lane, kind, shown: shownTally(tally) });
+    if (row.worked_ms > counts.workedAtMs) {
+      counts.workedAtMs = row.worked_ms;
+      counts.lastStepKey = step;
+    }
     counts.tallies.set(nameTally({ step, lane, kind }), tally);
   }
   return projects;

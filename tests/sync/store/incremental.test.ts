@@ -1,0 +1,66 @@
+import fc from 'fast-check';
+
+import { foldScope } from '../../../sync/merge/fold-scope';
+import { shownTally } from '../../../sync/merge/tally';
+import type { Command } from '../../../sync/store/command';
+import { openStore } from '../../../sync/store/open-store';
+import { loadState } from '../../../sync/store/read/load-state';
+import { readOperations } from '../../../sync/store/read/read-operations';
+import { openNodeDatabase } from '../../support/open-node-database';
+import { CUT, cutKey, handRequest, handTools, otherPairKey, PAIR, pairKey } from './hand-plan';
+
+jest.setTimeout(60_000);
+const id = 'p1';
+const key = fc.constantFrom(cutKey, pairKey, otherPairKey);
+const command: fc.Arbitrary<Command> = fc.oneof(
+  {
+    weight: 5,
+    arbitrary: fc
+      .record({ key, delta: fc.integer({ min: -2, max: 5 }) })
+      .map((tap) => ({ do: 'tap' as const, id, ...tap })),
+  },
+  {
+    weight: 2,
+    arbitrary: fc
+      .record({ key, want: fc.nat(20) })
+      .map((set) => ({ do: 'set' as const, id, ...set })),
+  },
+  {
+    weight: 3,
+    arbitrary: fc.subarray([CUT, PAIR]).map((steps) => ({ do: 'undo' as const, id, steps })),
+  },
+  fc.string({ unit: 'binary' }).map((name) => ({ do: 'rename' as const, id, name })),
+  fc.constant({ do: 'remove' as const, id }),
+  fc.constant({ do: 'restore' as const, id }),
+);
+
+it('keeps a view that equals all operations added up anew, and what a reopening reads', async () => {
+  await fc.assert(
+    fc.asyncProperty(fc.array(command, { maxLength: 30 }), async (commands) => {
+      const db = openNodeDatabase(':memory:');
+      const store = await openStore(db, handTools());
+      await store.perform(null, { do: 'create', id, name: 'P', note: '', request: handRequest });
+      for (const one of commands) await store.perform(null, one);
+      const folded = foldScope(await readOperations(db));
+      const record = (await loadState(db)).records.get(id);
+      const view = store.projects()[0];
+      expect(view === undefined).toBe(folded.deleted);
+      expect(record?.deleted).toBe(folded.deleted);
+      if (view) expect(record?.view).toEqual({ ...view, undoable: expect.anything() });
+      if (view) expect(new Set(record?.view.undoable)).toEqual(new Set(view.undoable));
+      expect(record?.view).toMatchObject({
+        workedAtMs: folded.workedAtMs,
+        lastStepKey: folded.lastStepKey,
+      });
+      const counts = [...folded.tallies.values()].map((tally) => [
+        tally.step,
+        tally.lane,
+        shownTally(tally),
+      ]);
+      const kept = record?.view.tallies.map((tally) => [tally.step, tally.lane, tally.shown]);
+      expect(kept?.sort()).toEqual(counts.sort());
+      await store.close();
+    }),
+    { numRuns: 60 },
+  );
+});
