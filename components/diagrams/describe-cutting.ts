@@ -3,7 +3,7 @@ import { cutRun, stackRun } from '@/shared/geometry/drawing/cut-run';
 import { laneLetters } from '@/shared/geometry/drawing/lane-letters';
 import { lengthBatch } from '@/shared/geometry/drawing/length-batch';
 import type { StepRole } from '@/shared/model/codes';
-import { formatExact, formatFraction, formatInches } from '@/shared/units/format-fraction';
+import { formatExact, formatInches } from '@/shared/units/format-fraction';
 
 type CuttingRole = Extract<
   StepRole,
@@ -41,7 +41,10 @@ const cut: Describe = (plan, lane, done) => {
   const { wedge } = plan.geometry;
   const strips = plan.fabrics.find(({ letter }) => letter === run.layers[0])?.strips ?? [];
   const long = strips.find((row) => row.for === 'wedge')?.length;
-  const pieces = `A ${long === undefined ? '' : `${formatFraction(long)} in `}length, ${formatInches(wedge.stripHeight)} high.`;
+  const pieces =
+    long === undefined
+      ? `A length ${formatInches(wedge.stripHeight)} high.`
+      : `A length of ${formatInches(long)}, ${formatInches(wedge.stripHeight)} high.`;
   const oneWay = plan.request.fabrics.some((f) => f.oneWay && run.layers.includes(f.letter));
   const turned = run.pieces.length === 1 || oneWay ? '' : ', every other one turned';
   const count = run.pieces.length === 1 ? '1 wedge' : `${run.pieces.length} wedges`;

@@ -16,7 +16,7 @@ const RING: RingShape = {
   tipTurnIn: 0.25,
   narrowIn: 2,
   wideIn: 7.5,
-  holeIn: 2,
+  holeIn: 2.54,
   reachIn: 7.25,
   tip: 'pointed',
   shoulderIn: 7.25 / (1 + Math.tan(Math.PI / 16)),
@@ -51,7 +51,6 @@ export function EmptyRing({ size }: { size: number }) {
           cy={fit.dy}
           r={RING.circleIn === null ? 0 : RING.circleIn * fit.scale}
           {...line}
-          fill={color.paper}
         />
       </Svg>
     </View>

@@ -1,4 +1,5 @@
-import { Rect } from 'react-native-svg';
+import { useId } from 'react';
+import { ClipPath, Defs, G, Rect } from 'react-native-svg';
 
 import { Badge, LaterCut, Piece } from '@/components/diagrams/parts/marks';
 import { DARK, HALO, type FabricPaint, type Paints } from '@/components/diagrams/parts/paints';
@@ -29,46 +30,54 @@ export function CutsDrawing({
   badgesAt,
   before = 0,
 }: Props) {
-  const { cloth, parts, scale } = layout;
+  const { clip, cloth, parts, scale } = layout;
+  const clipId = `clip-${useId().replace(/\W/g, '')}`;
   const next = parts.find(({ state }) => state === 'next');
   const halo = paint.dark;
   return (
     <>
-      <Rect {...cloth} fill={paint.right} stroke={paints.outline} strokeWidth={1} />
-      {parts.map(({ box, cut, index, state }) =>
-        state === 'later' ? (
-          <LaterCut key={index} points={cut} color={paint.ink} />
-        ) : (
-          <Piece
-            key={index}
-            points={cornersOf(box)}
-            fill={HALO}
-            opacity={state === 'next' ? 0.55 : 0}
-            line={state === 'next' ? DARK : paint.ink}
-            width={state === 'next' ? 2.5 : 1.3}
+      <Defs>
+        <ClipPath id={clipId}>
+          <Rect x={clip.x - 14} y={0} width={clip.width + 28} height={clip.y + clip.height + 40} />
+        </ClipPath>
+      </Defs>
+      <G clipPath={`url(#${clipId})`}>
+        <Rect {...cloth} fill={paint.right} stroke={paints.outline} strokeWidth={1} />
+        {parts.map(({ box, cut, index, state }) =>
+          state === 'later' ? (
+            <LaterCut key={index} points={cut} color={paint.ink} />
+          ) : (
+            <Piece
+              key={index}
+              points={cornersOf(box)}
+              fill={HALO}
+              opacity={state === 'next' ? 0.55 : 0}
+              line={state === 'next' ? DARK : paint.ink}
+              width={state === 'next' ? 2.5 : 1.3}
+            />
+          ),
+        )}
+        {next && (
+          <RulerAndCut
+            paints={paints}
+            cut={lifted(next.cut, lift)}
+            scale={scale}
+            width={Math.min(40, Math.max(14, scale * 1.15))}
+            side={leftHanded ? 1 : -1}
+            halo={halo}
+            overhang={8}
           />
-        ),
-      )}
-      {next && (
-        <RulerAndCut
-          paints={paints}
-          cut={lifted(next.cut, lift)}
-          scale={scale}
-          width={Math.min(40, Math.max(14, scale * 1.15))}
-          side={leftHanded ? 1 : -1}
-          halo={halo}
-          overhang={8}
-        />
-      )}
-      {parts.map(({ box, index, state }) => (
-        <Badge
-          key={index}
-          at={[box.x + box.width / 2, badgesAt ?? box.y + box.height / 2]}
-          text={String(before + index + 1)}
-          state={state}
-          radius={Math.max(8, Math.min(13, box.width * 0.36))}
-        />
-      ))}
+        )}
+        {parts.map(({ box, index, state }) => (
+          <Badge
+            key={index}
+            at={[box.x + box.width / 2, badgesAt ?? box.y + box.height / 2]}
+            text={String(before + index + 1)}
+            state={state}
+            radius={Math.max(8, Math.min(13, box.width * 0.36))}
+          />
+        ))}
+      </G>
     </>
   );
 }

@@ -66,13 +66,16 @@ export function Seam(props: {
   sewn?: boolean;
   halo?: boolean;
   closed?: boolean;
+  /** for small pictures */
+  fine?: boolean;
 }) {
   const d = pathOf(props.points, props.closed ?? false);
-  const dash = props.sewn ? {} : { strokeDasharray: '6 4' };
+  const width = props.fine ? 1.6 : 2.5;
+  const dash = props.sewn ? {} : { strokeDasharray: props.fine ? '4 2.5' : '6 4' };
   return (
     <>
-      {props.halo && <Path d={d} fill="none" stroke={HALO} strokeWidth={5} />}
-      <Path d={d} fill="none" stroke={props.color} strokeWidth={2.5} {...dash} />
+      {props.halo && <Path d={d} fill="none" stroke={HALO} strokeWidth={width * 2} />}
+      <Path d={d} fill="none" stroke={props.color} strokeWidth={width} {...dash} />
     </>
   );
 }

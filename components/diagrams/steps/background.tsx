@@ -109,7 +109,7 @@ function Folded({ cloth, folds, creases, fill, paint, paints }: FoldedProps) {
     <>
       <Piece points={cornersOf(cloth)} fill={fill} line={paints.outline} width={1.2} />
       {folds.map((fold, index) => (
-        <Path key={`f${index}`} d={pathOf(fold, false)} stroke={paints.outline} strokeWidth={3.5} />
+        <Path key={`f${index}`} d={pathOf(fold, false)} stroke={paint.ink} strokeWidth={3.5} />
       ))}
       {creases.map((crease, index) => (
         <Path

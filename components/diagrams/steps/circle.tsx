@@ -67,8 +67,8 @@ export function CircleTurnDrawing({ plan, box, paints }: Scene) {
     width: sizes.cutIn,
     height: sizes.cutIn,
   };
-  const back = fitInto(whole, inset(left, 16, 12, 10, 12));
-  const front = fitInto(whole, inset(right, 10, 12, 16, 12));
+  const back = fitInto(whole, inset(left, 54, 12, 6, 12));
+  const front = fitInto(whole, inset(right, 54, 12, 10, 12));
   const scale = back.scale;
   const finished = sizes.finishedIn * scale;
   const inner = Math.max(1, (sizes.finishedIn - sizes.turningIn) * scale);
@@ -103,7 +103,7 @@ export function CircleTurnDrawing({ plan, box, paints }: Scene) {
         halo={paint.cloth}
       />
       <Label at={[box.x + 16, box.y + 26]} text="Back" color={ink2} px={15} />
-      <Label at={[box.x + box.width / 2 + 4, box.y + 26]} text="Front" color={ink2} px={15} />
+      <Label at={[box.x + box.width / 2 + 8, box.y + 26]} text="Front" color={ink2} px={15} />
     </>
   );
 }

@@ -5,7 +5,7 @@ import { Facts } from '@/components/diagrams/parts/facts';
 import { Grid } from '@/components/diagrams/parts/grid';
 import { LevelDimension } from '@/components/diagrams/parts/label';
 import { CutLine, Piece, Seam } from '@/components/diagrams/parts/marks';
-import { HALO } from '@/components/diagrams/parts/paints';
+import { DARK, HALO } from '@/components/diagrams/parts/paints';
 import { RulerAndCut } from '@/components/diagrams/parts/ruler';
 import type { Scene } from '@/components/diagrams/parts/scene';
 import { circlePoints } from '@/shared/geometry/drawing/circle-points';
@@ -19,8 +19,9 @@ import { halfOf, toInches } from '@/shared/geometry/drawing/to-inches';
 import { preparedWedge } from '@/shared/geometry/drawing/wedge-outlines';
 import { formatInches } from '@/shared/units/format-fraction';
 
-const FACTS_WIDTH = 132;
-const STITCH_IN_FROM_EDGE = 0.12;
+const FACTS_WIDTH = 138;
+const STITCH_IN_FROM_EDGE = 0.12; // inches
+const LEAST_FOR_MEASURE = 240; // pixels
 
 const square = (sideIn: number): Box => ({
   x: -sideIn / 2,
@@ -44,7 +45,13 @@ const factsAt = (box: Box): [number, number] => [
 /** A line of stitches around an open hole, close to its raw edge. */
 export function StayStitchDrawing({ plan, shape, box, paints }: Scene) {
   const shownIn = Math.min(shape.reachIn, shape.narrowIn * 1.9 + 0.6);
-  const fit = fitInto(square(2 * shownIn), inset(box, 14, 4, FACTS_WIDTH, 4));
+  const view = {
+    x: -shape.reachIn,
+    y: -shownIn,
+    width: 2 * shape.reachIn,
+    height: 2 * shownIn,
+  };
+  const fit = fitInto(view, inset(box, 14, 4, FACTS_WIDTH, 4));
   const letters = plateLetters(plan);
   const stitchIn =
     (shape.narrowIn + shape.holeIn) / 2 + (shape.holeIn === shape.narrowIn ? 0.12 : 0);
@@ -82,7 +89,7 @@ export function AppliqueDrawing(scene: Scene) {
     <>
       <Grid box={box} fit={fit} paints={paints} />
       <BlockOnCloth scene={scene} fit={fit} sideIn={sideIn} />
-      <Seam points={applyFit(fit, edge)} color={paints.seam} closed halo />
+      <Seam points={applyFit(fit, edge)} color={paints.seam} fine={fit.scale < 16} closed halo />
       <Seam
         points={
           inner === null
@@ -90,6 +97,7 @@ export function AppliqueDrawing(scene: Scene) {
             : circlePoints(fit.dx, fit.dy, (inner - STITCH_IN_FROM_EDGE) * fit.scale)
         }
         color={paints.seam}
+        fine={fit.scale < 16}
         closed
         halo
       />
@@ -134,14 +142,16 @@ export function BlockTrimDrawing(scene: Scene) {
         halo={paint.dark}
         overhang={5}
       />
-      <LevelDimension
-        from={[fit.dx, fit.dy]}
-        to={[edge, fit.dy]}
-        text={formatInches(halfOf(trim))}
-        color={'#2A2017'}
-        halo={HALO}
-      />
-      <Circle cx={fit.dx} cy={fit.dy} r={3.5} fill={'#2A2017'} stroke={HALO} strokeWidth={1.5} />
+      {box.height >= LEAST_FOR_MEASURE && (
+        <LevelDimension
+          from={[fit.dx, fit.dy]}
+          to={[edge, fit.dy]}
+          text={formatInches(halfOf(trim))}
+          color={DARK}
+          halo={HALO}
+        />
+      )}
+      <Circle cx={fit.dx} cy={fit.dy} r={3.5} fill={DARK} stroke={HALO} strokeWidth={1.5} />
       <Facts
         at={factsAt(box)}
         lines={[

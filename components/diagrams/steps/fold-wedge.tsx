@@ -54,7 +54,7 @@ export function TipSewDrawing(scene: Scene) {
       <Piece points={outer} fill={paint.wrong} line={paints.outline} width={1.3} />
       {narrow && fold && (
         <>
-          <Path d={pathOf([narrow, fold], false)} stroke={paints.outline} strokeWidth={3} />
+          <Path d={pathOf([narrow, fold], false)} stroke={DARK} strokeWidth={3} />
           <Label at={[narrow[0], narrow[1] + 19]} text="Fold" color={ink2} />
         </>
       )}
@@ -76,16 +76,17 @@ export function TipSewDrawing(scene: Scene) {
 export function TipTrimDrawing(scene: Scene) {
   const { shape, box, paints } = scene;
   const paint = paintOf(scene);
-  const half = rawHalf(shape, shape.wideIn);
-  const room = { x: shape.reachIn - half * 1.5, y: -half, width: half * 1.5 + 0.4, height: half };
-  const fit = fitInto(room, inset(box, 24, 34, 120, 34));
+  // the wide end alone, so that an eighth of an inch can be seen
+  const half = Math.min(1.3, rawHalf(shape, shape.wideIn));
+  const room = { x: shape.reachIn - half * 2, y: -half, width: half * 2 + 0.4, height: half };
+  const fit = fitInto(room, inset(box, 24, 18, 104, 46));
   const trimIn = shape.reachIn + toInches(trimmedTo(scene));
   const trim = applyFit(fit, [
     [trimIn, 0],
     [trimIn, -rawHalf(shape, trimIn)],
   ]);
   const seam = applyFit(fit, seamAcross(scene));
-  const [, fold, wide] = applyFit(fit, foldedWedge(shape, shape.wideIn));
+  const [, fold] = applyFit(fit, foldedWedge(shape, shape.wideIn));
   const { ink, ink2, card } = paints.theme.color;
   const waste = applyFit(fit, [
     [trimIn, 0],
@@ -105,16 +106,17 @@ export function TipTrimDrawing(scene: Scene) {
       <Piece points={waste} fill={HALO} opacity={0.6} line={DARK} width={0.8} />
       <Seam points={seam} color={paints.seam} sewn />
       <CutLine points={trim} color={paints.cut} />
-      {fold && wide && seam[0] && trim[0] && (
+      <Path d={pathOf(applyFit(fit, foldLine(scene)), false)} stroke={DARK} strokeWidth={3} />
+      {fold && seam[0] && trim[0] && (
         <>
           <LevelDimension
-            from={[seam[0][0], wide[1] - 11]}
-            to={[trim[0][0], wide[1] - 11]}
+            from={[seam[0][0], fold[1] + 31]}
+            to={[trim[0][0], fold[1] + 31]}
             text={formatInches(trimmedTo(scene))}
             color={ink}
             halo={card}
           />
-          <Label at={[fold[0] + 14, (fold[1] + wide[1]) / 2]} text="Cut off" color={ink2} />
+          <Label at={[fold[0] + 14, fold[1] - 34]} text="Cut off" color={ink2} />
           <Label at={[box.x + 16, fold[1] + 19]} text="Fold" color={ink2} />
         </>
       )}
@@ -130,6 +132,11 @@ function trimmedTo({ plan, step }: Scene): FractionText {
   const { trimmed } = step.title.params;
   return typeof trimmed === 'string' ? trimmed : halfOf(tipSeam(plan));
 }
+
+const foldLine = ({ shape }: Scene): [number, number][] => [
+  [shape.narrowIn, 0],
+  [shape.wideIn, 0],
+];
 
 const seamAcross = ({ shape }: Scene): [number, number][] => [
   [shape.reachIn, 0],

@@ -3,6 +3,7 @@ import { Circle } from 'react-native-svg';
 import { Facts } from '@/components/diagrams/parts/facts';
 import { Grid } from '@/components/diagrams/parts/grid';
 import { ClothLetter, Piece, Seam } from '@/components/diagrams/parts/marks';
+import { HALO } from '@/components/diagrams/parts/paints';
 import type { Scene } from '@/components/diagrams/parts/scene';
 import { inset } from '@/shared/geometry/drawing/fit';
 import { layOutJoin } from '@/shared/geometry/drawing/join-layout';
@@ -33,12 +34,7 @@ function JoinDrawing({ scene, kind }: { scene: Scene; kind: 'quarter' | 'half' |
         <Seam key={index} points={seam} color={paints.seam} halo />
       ))}
       {seams.map((seam, index) => (
-        <ShoulderMark
-          key={index}
-          at={seam[1]}
-          color={paints.seam}
-          ground={paints.theme.color.card}
-        />
+        <ShoulderMark key={index} at={seam[1]} color={paints.seam} />
       ))}
       {letterPx >= LEAST_LETTER_PX &&
         wedges.map(({ letter, letterAt }, index) => (
@@ -60,13 +56,9 @@ function JoinDrawing({ scene, kind }: { scene: Scene; kind: 'quarter' | 'half' |
 
 const seamWords = (count: number): string => (count === 1 ? '1 seam' : `${count} seams`);
 
-function ShoulderMark(props: {
-  at: readonly [number, number] | undefined;
-  color: string;
-  ground: string;
-}) {
+function ShoulderMark(props: { at: readonly [number, number] | undefined; color: string }) {
   const [x, y] = props.at ?? [0, 0];
-  return <Circle cx={x} cy={y} r={4.5} fill={props.ground} stroke={props.color} strokeWidth={2} />;
+  return <Circle cx={x} cy={y} r={4.5} fill={HALO} stroke={props.color} strokeWidth={2} />;
 }
 
 export const QuarterDrawing = (scene: Scene) => <JoinDrawing scene={scene} kind="quarter" />;

@@ -7,7 +7,7 @@ import { layOutCuts } from '@/shared/geometry/drawing/strip-layout';
 import { toInches } from '@/shared/geometry/drawing/to-inches';
 import { formatInches } from '@/shared/units/format-fraction';
 
-const LEAST_HEIGHT_PX = 44;
+const LEAST_HEIGHT_PX = 24;
 
 /** A strip cut into lengths; a strip too fine to read at its whole width shows the part at hand. */
 export function LengthDrawing({ plan, lane, done, box, leftHanded, paints }: Scene) {

@@ -9,6 +9,8 @@ import { findUnit } from '@/shared/geometry/drawing/find-unit';
 import { laneLetters } from '@/shared/geometry/drawing/lane-letters';
 import type { Point } from '@/shared/geometry/drawing/points';
 
+const LEAST_FOR_WORDS = 130; // pixels
+
 /** Pairs in a chain under the needle: which fabric is on top, where the seam runs. */
 export function PairDrawing({ plan, lane, shape, box, paints }: Scene) {
   const letters = laneLetters(lane);
@@ -48,15 +50,21 @@ export function PairDrawing({ plan, lane, shape, box, paints }: Scene) {
           strokeWidth={2}
         />
       ))}
-      <Needle at={chain.needle} top={box.y + 12} color={paints.outline} />
-      <Arrow from={[right - 20, box.y + 24]} to={[right - 68, box.y + 24]} color={ink} />
-      <Label
-        at={[box.x + 16, box.y + box.height - 14]}
-        text="Wide end first. Short thread between pairs."
-        color={ink}
-        px={14.5}
-        halo={card}
+      <Needle
+        at={chain.needle}
+        top={Math.max(box.y + 12, chain.needle[1] - 150)}
+        color={paints.outline}
       />
+      <Arrow from={[right - 20, box.y + 20]} to={[right - 68, box.y + 20]} color={ink} />
+      {box.height >= LEAST_FOR_WORDS && (
+        <Label
+          at={[box.x + 16, box.y + box.height - 14]}
+          text="Wide end first. Short thread between pairs."
+          color={ink}
+          px={14.5}
+          halo={card}
+        />
+      )}
     </>
   );
 }

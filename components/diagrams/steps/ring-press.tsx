@@ -10,6 +10,8 @@ import { applyFit, fitInto, inset, type Fit } from '@/shared/geometry/drawing/fi
 import { boundsOf, twoPanels, type Box, type Point } from '@/shared/geometry/drawing/points';
 import { pressView } from '@/shared/geometry/drawing/press-view';
 
+const LEAST_FOR_ARROWS = 130; // pixels
+
 /** Two neighbours from the back, and their seam from the side: open, or all one way round. */
 export function RingPressDrawing(scene: Scene) {
   const { plan, shape, box, paints } = scene;
@@ -20,7 +22,7 @@ export function RingPressDrawing(scene: Scene) {
   const open = plan.request.press === 'open';
   const [backBox, sideBox] = twoPanels(box, 0.52);
   const { ink2 } = paints.theme.color;
-  const fit = fitInto(pressView(shape).view, inset(backBox, 16, 36, 16, 0));
+  const fit = fitInto(pressView(shape).view, inset(backBox, 54, 36, 10, 0));
   return (
     <>
       <Grid box={box} fit={fit} paints={paints} />
@@ -64,14 +66,15 @@ function BackView({ scene, fit, left, right, open }: ViewProps & { fit: Fit }) {
       <Seam points={seam} color={paints.seam} sewn halo={left.dark || right.dark} />
       <ClothLetter paint={left} at={letterAt(view.left)} px={16} />
       <ClothLetter paint={right} at={letterAt(view.right)} px={16} />
-      {open && <Arrow from={[top[0] + 7, box.y + 24]} to={[top[0] + 40, box.y + 24]} color={ink} />}
-      <Arrow from={[top[0] - 7, box.y + 24]} to={[top[0] - 40, box.y + 24]} color={ink} />
+      {open && <Arrow from={[top[0] + 7, box.y + 24]} to={[top[0] + 36, box.y + 24]} color={ink} />}
+      <Arrow from={[top[0] - 7, box.y + 24]} to={[top[0] - 36, box.y + 24]} color={ink} />
     </>
   );
 }
 
 function SideView({ scene, box, left, right, open }: ViewProps & { box: Box }) {
   const { paints } = scene;
+  const roomy = box.height >= LEAST_FOR_ARROWS;
   const half = Math.min(90, box.width / 2 - 16);
   const x = box.x + half;
   const y = box.y + box.height * 0.62;
@@ -98,8 +101,8 @@ function SideView({ scene, box, left, right, open }: ViewProps & { box: Box }) {
         strokeWidth={2.4}
         strokeDasharray="4 3"
       />
-      <Arrow from={[x - 8, y - 38]} to={[x - 40, y - 38]} color={ink} />
-      {open && <Arrow from={[x + 8, y - 38]} to={[x + 40, y - 38]} color={ink} />}
+      {roomy && <Arrow from={[x - 8, y - 38]} to={[x - 40, y - 38]} color={ink} />}
+      {roomy && open && <Arrow from={[x + 8, y - 38]} to={[x + 40, y - 38]} color={ink} />}
       <Label
         at={[x - half / 2, y + 32]}
         text={left.letter}

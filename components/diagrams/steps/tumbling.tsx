@@ -12,6 +12,8 @@ import { cutRun } from '@/shared/geometry/drawing/cut-run';
 import { layOutTumbling, type TumblingLayout } from '@/shared/geometry/drawing/tumbling-layout';
 import { formatExact, formatInches } from '@/shared/units/format-fraction';
 
+const LEAST_NUMBER_RADIUS = 10; // pixels
+
 /** A stack under the ruler: what is cut, the piece to cut now, and what comes after. */
 export function TumblingDrawing(scene: Scene) {
   const { plan, lane, done, box, leftHanded, paints } = scene;
@@ -21,13 +23,12 @@ export function TumblingDrawing(scene: Scene) {
   const top = paints.of(run.layers[0] ?? '');
   const next = layout.pieces.find(({ state }) => state === 'next');
   const { clip, offset } = layout;
-  const reach = offset * run.layers.length;
   return (
     <>
       <Grid box={box} fit={layout.fit} paints={paints} />
       <Defs>
         <ClipPath id={clipId}>
-          <Rect x={clip.x - 1} y={0} width={clip.width + reach + 2} height={box.height} />
+          <Rect x={clip.x - 1} y={0} width={clip.width + layout.reach + 2} height={box.height} />
         </ClipPath>
       </Defs>
       <G clipPath={`url(#${clipId})`}>
@@ -44,15 +45,18 @@ export function TumblingDrawing(scene: Scene) {
             overhang={Math.min(10, box.height * 0.06)}
           />
         )}
-        {layout.pieces.map(({ middle, state }, index) => (
-          <Badge
-            key={index}
-            at={middle}
-            text={String(index + 1)}
-            state={state}
-            radius={layout.badgeRadius}
-          />
-        ))}
+        {layout.pieces.map(({ middle, state }, index) =>
+          // in a fine run only the next number is written; later ones are dashed lines anyhow
+          layout.badgeRadius < LEAST_NUMBER_RADIUS && state === 'later' ? null : (
+            <Badge
+              key={index}
+              at={middle}
+              text={String(index + 1)}
+              state={state}
+              radius={state === 'next' ? Math.max(12, layout.badgeRadius) : layout.badgeRadius}
+            />
+          ),
+        )}
       </G>
       <LayerRows letters={run.layers} box={layout.rows} paints={paints} />
       {layout.roomy && <Measures scene={scene} layout={layout} />}
@@ -80,11 +84,11 @@ function Pieces({ layout, ink, dark }: { layout: TumblingLayout; ink: string; da
 
 function Measures({ scene, layout }: { scene: Scene; layout: TumblingLayout }) {
   const { plan, paints } = scene;
-  const { clip, offset } = layout;
+  const { clip } = layout;
   const { wedge } = plan.geometry;
   const ink = { color: paints.theme.color.ink, halo: paints.theme.color.card };
   const piece = layout.pieces.find(({ state }) => state !== 'done') ?? layout.pieces[0];
-  const ys = { top: clip.y - 26, bottom: clip.y + clip.height + offset * 6 + 36 };
+  const ys = { top: clip.y - 26, bottom: clip.y + clip.height + layout.reach + 30 };
   const [a, b, c, d] = piece?.outline ?? [];
   return (
     <>

@@ -23,6 +23,7 @@ export interface ChainLayout {
 
 const PEEP: Point = [7, -6]; // the lower wedge shows behind the upper one, pixels
 const GAP_IN = 0.65;
+const MOST_SCALE = 64; // pixels an inch
 const NEEDLE_AT = 0.42; // of the seam, from its narrow end
 
 /**
@@ -34,10 +35,10 @@ export function layOutChain(shape: RingShape, box: Box): ChainLayout {
   const size = boundsOf(inches);
   const scale = Math.min(
     (box.height * 0.5) / size.height,
-    box.width / (1.55 * (size.width + GAP_IN)),
-    40,
+    box.width / (2.3 * (size.width + GAP_IN)),
+    MOST_SCALE,
   );
-  const bottom = box.y + box.height * 0.7;
+  const bottom = box.y + box.height * (box.height < 130 ? 0.86 : 0.72);
   const period = (size.width + GAP_IN) * scale;
   const home = box.x + box.width * 0.22;
   const fitAt = (x: number): Fit => ({

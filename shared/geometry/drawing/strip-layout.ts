@@ -14,6 +14,8 @@ export interface CutPart {
 export interface StripLayout {
   scale: number;
   cloth: Box;
+  /** what shows of it */
+  clip: Box;
   parts: CutPart[];
 }
 
@@ -58,7 +60,12 @@ export function layOutCuts(cuts: {
       state: index < done ? 'done' : index === done ? 'next' : 'later',
     };
   });
-  return { scale, cloth: place(0, clothIn), parts };
+  return {
+    scale,
+    cloth: place(0, clothIn),
+    clip: { ...room, width: Math.min(room.width, clothIn * scale), height: cuts.heightPx },
+    parts,
+  };
 }
 
 /** The corners of a box, clockwise from the top left. */

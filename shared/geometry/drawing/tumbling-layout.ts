@@ -10,6 +10,8 @@ export interface TumblingLayout {
   clip: Box;
   /** how far each layer peeps out below the one above */
   offset: number;
+  /** how far they all peep out together */
+  reach: number;
   pieces: {
     outline: Point[];
     /** the cut that frees it, from the maker's side away from her */
@@ -26,7 +28,9 @@ export interface TumblingLayout {
 
 const LEAST_HEIGHT_PX = 70;
 const LEAST_PITCH_PX = 30;
-const ROOMY_PX = 240;
+const ROOMY_PX = 330;
+const ROWS_WIDTH = 72;
+const EDGE = 16;
 
 /** Lays a stack out under the ruler. A long one shows the part that is being cut. */
 export function layOutTumbling(run: CutRun, box: Box, leftHanded: boolean): TumblingLayout {
@@ -57,13 +61,14 @@ export function layOutTumbling(run: CutRun, box: Box, leftHanded: boolean): Tumb
     },
     clip,
     offset,
+    reach: offset * run.layers.length,
     pieces: run.pieces.map((piece, index) => ({
       outline: turn(piece.outline),
       cut: pairOf(turn(piece.cut)),
       middle: turn([[piece.middleX, run.heightIn / 2]])[0] ?? [0, 0],
       state: index < run.done ? 'done' : index === run.done ? 'next' : 'later',
     })),
-    badgeRadius: Math.max(8, Math.min(13, pitchPx * 0.36)),
+    badgeRadius: Math.max(7, Math.min(13, pitchPx * 0.36)),
     rows: rowsBox(box, roomy),
     roomy,
   };
@@ -72,10 +77,10 @@ export function layOutTumbling(run: CutRun, box: Box, leftHanded: boolean): Tumb
 const pairOf = (points: Point[]): [Point, Point] => [points[0] ?? [0, 0], points[1] ?? [0, 0]];
 
 function clothRoom(box: Box, roomy: boolean): Box {
-  const left = roomy ? 52 : 18;
-  const right = 72 + 16 + 34;
+  const left = roomy ? 58 : 18;
+  const right = roomy ? 40 : ROWS_WIDTH + EDGE + 34;
   const top = roomy ? 56 : Math.min(19, box.height * 0.12);
-  const bottom = roomy ? 84 : Math.min(28, box.height * 0.18);
+  const bottom = roomy ? 186 : Math.min(28, box.height * 0.18);
   return {
     x: box.x + left,
     y: box.y + top,
@@ -84,12 +89,17 @@ function clothRoom(box: Box, roomy: boolean): Box {
   };
 }
 
-const rowsBox = (box: Box, roomy: boolean): Box => ({
-  x: box.x + box.width - 72 - 16,
-  y: box.y + (roomy ? box.height / 2 - 80 : 16),
-  width: 72,
-  height: roomy ? 160 : Math.max(20, box.height - 32),
-});
+/** Beside the cloth, or below it where there is room to measure. */
+function rowsBox(box: Box, roomy: boolean): Box {
+  const height = roomy ? 104 : Math.max(20, box.height - 2 * EDGE);
+  const width = roomy ? 104 : ROWS_WIDTH;
+  return {
+    x: box.x + box.width - width - EDGE,
+    y: box.y + (roomy ? box.height - height - EDGE : EDGE),
+    width,
+    height,
+  };
+}
 
 function pitchOf(run: CutRun): number {
   const [first, second] = run.pieces;
