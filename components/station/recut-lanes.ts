@@ -15,8 +15,8 @@ export function wedgesLost(item: string): string[] {
 }
 
 /**
- * The lanes that make lost wedges again: one a fabric, a lane already open for it growing by what
- * is lost now.
+ * The lanes that make lost wedges again, one a fabric. A lane never changes once it is opened, so a
+ * later loss in the same fabric opens the next one.
  *
  * @param open extra lanes of the project so far
  */
@@ -32,7 +32,12 @@ export function recutLanes(
   }
   return [...wanted].map(([letter, count]) => {
     const lane = recutLane(plan, letter, count);
-    const known = open.find((each) => each.step === lane.step && each.key === lane.key);
-    return known ? { ...lane, target: known.target + count } : lane;
+    const taken = open.filter(({ step, key }) => step === lane.step && isOf(key, lane.key)).length;
+    return taken === 0 ? lane : { ...lane, key: `${lane.key} ${taken + 1}` };
   });
+}
+
+/** "D1", "D1 2", "D1 3": the lanes opened for one fabric, one after the other. */
+function isOf(key: string, first: string): boolean {
+  return key === first || key.startsWith(`${first} `);
 }
