@@ -1,5 +1,6 @@
-import { StyleSheet, Text, View } from 'react-native';
+import { View } from 'react-native';
 
+import { Spoken } from '@/components/ui/spoken';
 import { useThrottled } from '@/components/ui/use-throttled';
 
 const ONCE_A_SECOND_MS = 1000;
@@ -8,18 +9,8 @@ const ONCE_A_SECOND_MS = 1000;
 export function Announcement({ text }: { text: string }) {
   const said = useThrottled(text, ONCE_A_SECOND_MS);
   return (
-    <View role="status" aria-live="polite" style={styles.unseen}>
-      <Text>{said}</Text>
+    <View role="status" aria-live="polite">
+      <Spoken>{said}</Spoken>
     </View>
   );
 }
-
-const styles = StyleSheet.create({
-  unseen: {
-    position: 'absolute',
-    width: 1,
-    height: 1,
-    overflow: 'hidden',
-    opacity: 0,
-  },
-});

@@ -1,6 +1,7 @@
 import { Pressable, StyleSheet, View } from 'react-native';
 
 import { Icon } from '@/components/ui/icon';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { STATION_NAMES } from '@/components/ui/stations';
 import { border, radius, size, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
@@ -57,7 +58,7 @@ function Tab({ station, on, count, onPress }: TabProps) {
       {...pressable}
       role="tab"
       aria-selected={on}
-      aria-label={count > 0 && !on ? `${name}, ${count} ready` : name}
+      {...deviceName(count > 0 && !on ? `${name}, ${count} ready` : name)}
       testID={`station-${station}`}
       onPress={onPress}
       style={[
@@ -76,13 +77,11 @@ function Tab({ station, on, count, onPress }: TabProps) {
         {name}
       </Txt>
       {count > 0 && !on && (
-        <View
-          aria-hidden
-          style={[styles.count, { backgroundColor: theme.color.card, borderColor: dye.ink }]}
-        >
+        <View style={[styles.count, { backgroundColor: theme.color.card, borderColor: dye.ink }]}>
           <Txt kind="header" color={dye.ink} style={styles.number}>
             {count}
           </Txt>
+          <Spoken>ready</Spoken>
         </View>
       )}
     </Pressable>

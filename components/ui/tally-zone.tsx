@@ -6,6 +6,7 @@ import { darken } from '@/components/ui/darken';
 import { Icon } from '@/components/ui/icon';
 import { MatGrid } from '@/components/ui/mat-grid';
 import { RulerBar } from '@/components/ui/ruler-bar';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { TallyNumber } from '@/components/ui/tally-number';
 import { TallyTop } from '@/components/ui/tally-top';
 import { border, radius, useTheme } from '@/components/ui/theme';
@@ -47,6 +48,7 @@ export function TallyZone(props: TallyZoneProps) {
   const { station, shown, target, caption, full = false, locked = false, testID = 'tally' } = props;
   const dye = useTheme().station(station);
   const [box, setBox] = useState({ width: 0, height: 0 });
+  const name = locked ? 'Locked. Hold to unlock' : props.label;
   const fill = full ? dye.tint : dye.fill;
   const ink = full ? dye.ink : dye.onFill;
   return (
@@ -55,7 +57,7 @@ export function TallyZone(props: TallyZoneProps) {
         {...pressable}
         {...useZonePress(props, locked)}
         role="button"
-        aria-label={locked ? 'Locked. Hold to unlock' : props.label}
+        {...deviceName(name)}
         testID={testID}
         onLayout={({ nativeEvent: { layout } }) => setBox(layout)}
         style={({ pressed }) => [
@@ -65,6 +67,7 @@ export function TallyZone(props: TallyZoneProps) {
           locked && styles.locked,
         ]}
       >
+        <Spoken>{name}</Spoken>
         <MatGrid color={ink} />
         <TallyTop {...props} full={full} locked={locked} />
         <View style={styles.middle} aria-hidden>
