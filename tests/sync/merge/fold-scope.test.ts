@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { foldScope } from '../../../sync/merge/fold-scope';
 import { hashIdentity, NO_EDITS, xorHashes } from '../../../sync/merge/identity-hash';

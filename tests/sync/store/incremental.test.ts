@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { foldScope } from '../../../sync/merge/fold-scope';
 import { shownTally } from '../../../sync/merge/tally';
