@@ -42,7 +42,7 @@ describe('the live result', () => {
     expect(text()).toContain('No slack in Lantern. All 9 in of ¼ yd used.');
     expect(text()).toContain('No slack in Fog. All 27 in of ¾ yd used.');
     expect(text()).toContain('½ in spare in A, C, D and E.');
-  }, 20_000);
+  });
 
   it('lists strips, needs, cloth to buy and spare of each fabric as a table', async () => {
     await open();

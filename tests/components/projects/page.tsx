@@ -6,6 +6,9 @@ import { ToastProvider } from '@/components/providers/toast';
 
 import { find, type Mounted, mountWeb } from '../ui/mount-web';
 
+// whole screens in jsdom: seconds, on a machine that has other work too
+jest.setTimeout(60_000);
+
 const INSETS = {
   frame: { x: 0, y: 0, width: 390, height: 844 },
   insets: { top: 0, left: 0, right: 0, bottom: 0 },
