@@ -17,15 +17,24 @@ function look() {
   return existsSync(program) ? launcherFor(program) : null;
 }
 
-/** A one-line script, so that only Chromium gets the unpacked libraries, not Node. */
+/** A short script, so that only Chromium gets the unpacked libraries, not Node. */
 function launcherFor(program) {
   const launcher = path.join(UNPACKED, 'chromium');
-  const fonts = existsSync('/etc/fonts/fonts.conf') ? '/etc/fonts' : `${UNPACKED}/etc/fonts`;
-  const env = { ...unpackedEnv(), FONTCONFIG_PATH: fonts };
+  const env = { ...unpackedEnv(), FONTCONFIG_FILE: writeFontsConfig() };
   const words = Object.entries(env).map(([name, value]) => `${name}='${value}'`);
   writeFileSync(launcher, `#!/bin/sh\n${words.join(' ')} exec '${program}' "$@"\n`);
   chmodSync(launcher, 0o755);
   return launcher;
+}
+
+/** Debian's own names /usr/share/fonts only, where the unpacked fonts are not. */
+function writeFontsConfig() {
+  const file = path.join(UNPACKED, 'fonts.conf');
+  const folders = ['/usr/share/fonts', path.join(UNPACKED, 'usr/share/fonts')];
+  const cache = `<cachedir>${path.join(UNPACKED, 'fonts-cache')}</cachedir>`;
+  const lines = [...folders.map((it) => `<dir>${it}</dir>`), cache];
+  writeFileSync(file, `<fontconfig>\n${lines.join('\n')}\n</fontconfig>\n`);
+  return file;
 }
 
 async function choose(aptOptions) {

@@ -129,14 +129,23 @@ function ownState(work) {
   return Object.entries(settings).flatMap(([key, value]) => ['-o', `${key}=${value}`]);
 }
 
-/** The environment for programs in UNPACKED: their libraries lie there too. */
+/** The environment for programs in UNPACKED: their libraries lie there too, some a level down. */
 export function unpackedEnv() {
-  const folders = ['usr/lib', 'lib'].flatMap((lib) => {
-    const full = path.join(UNPACKED, lib);
-    const machine = existsSync(full) ? readdirSync(full).filter((it) => /-linux-gnu/.test(it)) : [];
-    return machine.flatMap((it) => [path.join(full, it), path.join(full, it, 'nss')]);
+  const own = ['usr/lib', 'lib'].flatMap((lib) => {
+    const machines = foldersIn(path.join(UNPACKED, lib)).filter((it) => it.includes('-linux-gnu'));
+    return machines.flatMap((machine) => [machine, ...foldersIn(machine).filter(holdsLibraries)]);
   });
-  return {
-    LD_LIBRARY_PATH: [...folders, process.env.LD_LIBRARY_PATH ?? ''].filter(Boolean).join(':'),
-  };
+  const before = process.env.LD_LIBRARY_PATH;
+  return { LD_LIBRARY_PATH: [...own, ...(before ? [before] : [])].join(':') };
+}
+
+function foldersIn(folder) {
+  if (!existsSync(folder)) return [];
+  return readdirSync(folder, { withFileTypes: true })
+    .filter((entry) => entry.isDirectory())
+    .map((entry) => path.join(folder, entry.name));
+}
+
+function holdsLibraries(folder) {
+  return readdirSync(folder).some((name) => /^lib.*\.so/.test(name));
 }
