@@ -28,7 +28,7 @@ export function planFabric(
 }
 
 /** Inches along the cloth that strips take. */
-export function lengthOfStrips(strips: readonly PlanStrip[]): Fraction {
+function lengthOfStrips(strips: readonly PlanStrip[]): Fraction {
   return strips.reduce(
     (sum, { height, count }) => sum.add(toFraction(height).mul(count)),
     new Fraction(0),

@@ -30,8 +30,6 @@ import {
   warnOfShape,
 } from './ring-warnings';
 
-export { ENGINE_VERSION };
-
 const CAUTIOUS_WIDTH = new Fraction(40);
 
 /**

@@ -24,7 +24,7 @@ export function cuttingSteps(request: PlanRequest, groups: readonly CutGroup[]):
 }
 
 /** The item a stack counts as. @example "stack:A+B+C+D" */
-export function stackItem(group: CutGroup): string {
+function stackItem(group: CutGroup): string {
   return `stack:${lettersOf(group).join('+')}`;
 }
 

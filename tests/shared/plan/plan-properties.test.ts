@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import type { Plan } from '../../../shared/model/plan';
 import { PlanRefusalSchema, PlanSchema } from '../../../shared/model/plan';

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { defaultCap } from '../../../shared/stacks/default-cap';
 import { layerOrder } from '../../../shared/stacks/layer-order';

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import type { StepRole } from '../../../shared/model/codes';
 import type { Plan } from '../../../shared/model/plan';

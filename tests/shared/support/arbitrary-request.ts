@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import type { FractionText } from '../../../shared/model/length';
 import type { PlanRequest, RequestFabric } from '../../../shared/model/plan-request';

@@ -5,13 +5,12 @@ declare module 'clipper-lib' {
     Y: number;
   }
   type Path = IntPoint[];
-  class ClipperOffset {
-    constructor(miterLimit: number, arcTolerance: number);
+  interface Offset {
     AddPath(path: Path, join: number, end: number): void;
     Execute(solution: Path[], delta: number): void;
   }
   const ClipperLib: {
-    ClipperOffset: typeof ClipperOffset;
+    ClipperOffset: new (miterLimit: number, arcTolerance: number) => Offset;
     JoinType: { jtMiter: number };
     EndType: { etClosedPolygon: number };
     Paths: new () => Path[];

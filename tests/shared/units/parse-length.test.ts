@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { formatFraction } from '../../../shared/units/format-fraction';
 import { parseLength } from '../../../shared/units/parse-length';

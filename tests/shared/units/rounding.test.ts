@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { Fraction } from 'fraction.js';
 
 import { toFraction, toText } from '../../../shared/units/fraction';

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { fabricOrder } from '../../../../shared/patterns/ring/fabric-order';
 import { ringLetters } from '../../../../shared/patterns/ring/ring-letters';
