@@ -9,6 +9,7 @@ import { openNodeDatabase } from '../../support/open-node-database';
 import { CUT, cutKey, handRequest } from '../store/hand-plan';
 import { openFakeBrowser, type FakeBrowser, type FakeTab } from './fake-tabs';
 
+jest.setTimeout(30_000);
 const folder = mkdtempSync(path.join(tmpdir(), 'tabs-'));
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 

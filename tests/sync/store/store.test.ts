@@ -10,6 +10,7 @@ import type { SqlDatabase } from '../../../sync/store/sql-database';
 import { openNodeDatabase } from '../../support/open-node-database';
 import { CUT, cutKey, handRequest, handTools, otherPairKey, PAIR, pairKey } from './hand-plan';
 
+jest.setTimeout(30_000);
 const folder = mkdtempSync(path.join(tmpdir(), 'store-'));
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
