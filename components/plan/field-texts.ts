@@ -67,7 +67,7 @@ export function stepSize(field: SizeField, text: string, by: 1 | -1): string | n
   const read = readSize(field, text);
   if (!read.ok) return null;
   const next = toFraction(read.value).add(toFraction(STEPS[field] ?? '1').mul(by));
-  const least = field === 'shrinkPercent' ? 0 : 1;
-  if (next.s < least && !(least === 0 && next.equals(0))) return null;
+  const nothingLeft = field === 'shrinkPercent' ? next.lt(0) : next.lte(0);
+  if (nothingLeft) return null;
   return formatFraction(toText(next));
 }

@@ -1,7 +1,7 @@
 import { count } from '@/components/plan/plan-facts';
 import { piecesPerStrip } from '@/shared/cutting/pieces-per-strip';
 import type { Plan, PlanStrip } from '@/shared/model/plan';
-import { formatInches } from '@/shared/units/format-fraction';
+import { formatFraction, formatInches } from '@/shared/units/format-fraction';
 import { toFraction, toText } from '@/shared/units/fraction';
 
 export interface StripLine {
@@ -12,7 +12,7 @@ export interface StripLine {
   then: string;
   /** "20 wedges" */
   makes: string;
-  /** "2 × 4 in left of the last strip"; null when nothing is */
+  /** "17 × 5 in left"; null when nothing is */
   left: string | null;
 }
 
@@ -29,7 +29,7 @@ function writeLeft(strip: PlanStrip, usableWidth: string): string | null {
   const before = (strip.count - 1) * piecesPerStrip(usable, length);
   const left = usable.sub(length.mul(Math.max(0, strip.lengths - before)));
   if (left.lte(0)) return null;
-  return `${formatInches(toText(left))} of ${formatInches(strip.height)} left`;
+  return `${formatFraction(toText(left))} × ${formatInches(strip.height)} left`;
 }
 
 /** How each strip is cut, in the order of the fabrics' letters. */
