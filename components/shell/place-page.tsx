@@ -13,6 +13,9 @@ import { useLayout } from '@/components/ui/use-layout';
 
 const NAMES: Record<Place, string> = { ready: 'Ready', projects: 'Projects', me: 'Me' };
 
+/** One column is no wider than can be read with ease. */
+const LINE_PX = 760;
+
 interface PlacePageProps {
   place: Place;
   /** the place's own name when left out */
@@ -44,18 +47,14 @@ export function PlacePage(props: PlacePageProps) {
       {wide && aside ? (
         <TwoPanes left={children} right={aside} />
       ) : (
-        <>
+        <View style={[styles.column, !scroll && styles.still]}>
           {children}
           {aside}
-        </>
+        </View>
       )}
     </>
   );
-  const limits = [
-    wide ? styles.wide : styles.phone,
-    { maxWidth: aside ? 1240 : 760 },
-    !wide && { paddingTop: top },
-  ];
+  const limits = wide ? styles.wide : [styles.phone, { paddingTop: top + 6 }];
   return (
     <View style={[styles.page, wide && styles.sideways, { backgroundColor: color.paper }]}>
       {wide && <PlacesRail here={place} />}
@@ -76,12 +75,22 @@ const styles = StyleSheet.create({
   sideways: { flexDirection: 'row' },
   main: { flex: 1, minWidth: 0 },
   still: { flex: 1 },
+  column: { width: '100%', maxWidth: LINE_PX, flexGrow: 1 },
   phone: {
     width: '100%',
+    maxWidth: LINE_PX,
     flexGrow: 1,
     alignSelf: 'center',
     paddingHorizontal: pageEdge.phone,
     paddingBottom: 20,
   },
-  wide: { width: '100%', flexGrow: 1, paddingHorizontal: 32, paddingTop: 22, paddingBottom: 30 },
+  wide: {
+    width: '100%',
+    maxWidth: 1240,
+    flexGrow: 1,
+    alignSelf: 'center',
+    paddingHorizontal: 32,
+    paddingTop: 22,
+    paddingBottom: 30,
+  },
 });
