@@ -34,7 +34,12 @@ export function BlockDrawing({
   const widthIn = backgroundless ? 2 * ringExtent(shape) : toInches(plan.request.block);
   const fit: Fit = { scale: (size - 2) / widthIn, dx: size / 2, dy: size / 2 };
   return (
-    <View role="img" aria-label={describeBlock(plan)} style={{ width: size, height: size }}>
+    <View
+      accessible
+      role="img"
+      aria-label={describeBlock(plan)}
+      style={{ width: size, height: size }}
+    >
       <Svg width={size} height={size}>
         <PaintDefs paints={paints} scale={Math.min(1, Math.max(0.6, size / 260))} />
         {!backgroundless && <Background plan={plan} paints={paints} size={size} />}

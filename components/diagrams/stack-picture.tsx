@@ -18,6 +18,7 @@ export function StackPicture({ layers, width, height }: Props) {
   const letters = layers.map(({ letter }) => letter);
   return (
     <View
+      accessible
       role="img"
       aria-label={`${layers.length} layers from the top: ${letters.join(', ')}`}
       style={{ width, height }}

@@ -43,6 +43,7 @@ export function StepDiagram({ plan, step, lane, done, height, width, leftHanded 
   };
   return (
     <View
+      accessible
       role="img"
       aria-label={describeStep(plan, step, lane, done)}
       onLayout={width === undefined ? onLayout : undefined}

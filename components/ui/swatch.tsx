@@ -35,7 +35,9 @@ export function Swatch({ fabric, size, dominant = false, label }: Props) {
   };
   return (
     <View
-      {...(words === '' ? { 'aria-hidden': true } : { role: 'img' as const, 'aria-label': words })}
+      {...(words === ''
+        ? { 'aria-hidden': true }
+        : { accessible: true, role: 'img' as const, 'aria-label': words })}
       style={{ width: size, height: size, flexShrink: 0 }}
     >
       <Svg width={size} height={size} style={{ overflow: 'visible' }}>
