@@ -14,9 +14,6 @@ export interface Stamped extends Identity {
 
 export const nameIdentity = ({ session, seq }: Identity) => `${session}:${seq}`;
 
-export const sameIdentity = (a: Identity | null, b: Identity | null) =>
-  a === b || (a !== null && b !== null && a.seq === b.seq && a.session === b.session);
-
 /** Positive when `a` is the larger (stamp, session, seq): the same order on every device. */
 export function compareStamped(a: Stamped, b: Stamped): number {
   if (a.stampMs !== b.stampMs) return a.stampMs - b.stampMs;
