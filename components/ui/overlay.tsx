@@ -58,13 +58,7 @@ export function Overlay(props: OverlayProps) {
         >
           <ScrollView contentContainerStyle={styles.inside}>
             <View {...webOnly({ onKeyDown: swallow })}>
-              <Txt
-                kind="section"
-                heading={2}
-                id={titleId}
-                tabIndex={-1}
-                style={styles.title}
-              >
+              <Txt kind="section" heading={2} id={titleId} tabIndex={-1} style={styles.title}>
                 {title}
               </Txt>
             </View>

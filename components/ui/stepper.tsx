@@ -90,7 +90,7 @@ function End({ label, icon, possible, onStep }: EndProps) {
     <Pressable
       role="button"
       aria-label={label}
-      aria-disabled={!possible}
+      disabled={!possible}
       {...webOnly({ dataSet: { ring: 'inside' } })}
       {...useHold(onStep, possible)}
       style={({ pressed }) => [styles.end, pressed && { backgroundColor: color.sunk }]}
