@@ -12,7 +12,7 @@ export function SafetyScreen() {
   return (
     <PlacePage place="me" title="Safety" back={{ label: 'Me', href: '/me' }}>
       <View style={styles.page}>
-        <Note tone="info" title="Usual cautions." text={DEFERENCE} />
+        <Note tone="info" title="Others come first." text={DEFERENCE} />
         <LinkText href="/first-aid">First aid for a cut</LinkText>
         {CAUTION_GROUPS.map((group) => (
           <View key={group.title} style={styles.group}>

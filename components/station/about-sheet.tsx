@@ -1,8 +1,9 @@
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
+import { joinWords } from '@/components/station/enough-text';
 import { neighbours } from '@/components/station/next-step';
-import { countItem } from '@/components/steps/item-words';
+import { countItem, itemKind, itemLetters } from '@/components/steps/item-words';
 import { cautionText, mistakeText, stepTitle, stepWhy } from '@/components/steps/messages';
 import { pieceSizes } from '@/components/steps/piece-sizes';
 import { Button } from '@/components/ui/button';
@@ -77,39 +78,52 @@ function StepButton(props: {
 
 /** What one tap uses and makes, each with its cut and finished size. */
 function Flow({ plan, lane }: { plan: Plan; lane: PlanLane }) {
-  const used = Object.keys(lane.consumes);
   return (
     <>
-      {used.length > 0 ? (
-        <Section title="Uses">
-          {used.map((item) => (
-            <ItemLine key={item} plan={plan} item={item} amount={lane.consumes[item] ?? 1} />
-          ))}
-        </Section>
-      ) : null}
-      <Section title="Makes">
-        {Object.entries(lane.makes).map(([item, count]) => (
-          <ItemLine key={item} plan={plan} item={item} amount={count} />
-        ))}
-      </Section>
+      <Items title="Uses" plan={plan} amounts={lane.consumes} />
+      <Items title="Makes" plan={plan} amounts={lane.makes} />
     </>
   );
 }
 
-function ItemLine(props: { plan: Plan; item: string; amount: number | string }) {
-  const { plan, item, amount } = props;
-  const { cut, finished } = pieceSizes(item, plan);
-  const name =
-    typeof amount === 'number'
-      ? countItem(item, amount)
-      : `${fractionWords(amount)} of ${countItem(item, 1)}`;
+function Items(props: { title: string; plan: Plan; amounts: PlanLane['consumes'] }) {
+  const { title, plan, amounts } = props;
+  const groups = groupItems(amounts);
+  if (groups.length === 0) return null;
   return (
-    <View>
-      <Txt style={styles.strong}>{name}</Txt>
-      {cut ? <Txt kind="small" color="ink2">{`Cut ${cut}`}</Txt> : null}
-      {finished ? <Txt kind="small" color="ink2">{`Finished ${finished}`}</Txt> : null}
-    </View>
+    <Section title={title}>
+      {groups.map(({ name, item }) => {
+        const { cut, finished } = pieceSizes(item, plan);
+        return (
+          <View key={name}>
+            <Txt style={styles.strong}>{name}</Txt>
+            {cut ? <Txt kind="small" color="ink2">{`Cut ${cut}`}</Txt> : null}
+            {finished ? <Txt kind="small" color="ink2">{`Finished ${finished}`}</Txt> : null}
+          </View>
+        );
+      })}
+    </Section>
   );
+}
+
+/** "1 wedge in each of A, B and C": pieces of one kind have one size, so they share a line. */
+function groupItems(amounts: PlanLane['consumes']): { name: string; item: string }[] {
+  const groups = new Map<string, string[]>();
+  for (const [item, amount] of Object.entries(amounts)) {
+    const group = `${amount} ${itemKind(item)}`;
+    groups.set(group, [...(groups.get(group) ?? []), item]);
+  }
+  return [...groups.values()].map((items) => {
+    const [item = ''] = items;
+    const amount = amounts[item] ?? 1;
+    const one = items.length === 1 ? item : itemKind(item);
+    const of = items.length === 1 ? '' : ` in each of ${joinWords(items.map(itemLetters))}`;
+    const count =
+      typeof amount === 'number'
+        ? countItem(one, amount)
+        : `${fractionWords(amount)} of ${countItem(one, 1)}`;
+    return { name: `${count}${of}`, item };
+  });
 }
 
 /** "1⁄5" of a strip: a part of a thing, as the plan shares it out. */

@@ -6,6 +6,7 @@ import { unitWord } from '@/components/steps/messages';
 
 /** More lanes than this are not named one by one. */
 const NAMED_LANES = 3;
+const NAMED_ITEMS = 2;
 
 /**
  * What the pieces on hand allow at a step, in words; null when it starts from cloth or is done.
@@ -34,11 +35,21 @@ export function enoughText(step: StepProgress, lane: LaneProgress | null): strin
 
 /** "Waiting for 4 turned tips in A": what a step lacks. */
 export function waitingText(step: StepProgress): string {
-  const missing = step.waitingFor.map(({ item, missing: count }) =>
-    countItem(item, Math.ceil(count)),
-  );
-  if (missing.length === 0) return 'Nothing on hand yet';
-  return `Waiting for ${joinWords(missing.slice(0, NAMED_LANES))}`;
+  const missing = missingItems(step);
+  return missing === '' ? 'Nothing on hand yet' : `Waiting for ${missing}`;
+}
+
+/** "4 turned tips in A and 2 in …", by kind alone where more than two fabrics are short. */
+function missingItems({ waitingFor }: StepProgress): string {
+  const whole = waitingFor.map(({ item, missing }) => ({ item, count: Math.ceil(missing) }));
+  if (whole.length <= NAMED_ITEMS) {
+    return joinWords(whole.map(({ item, count }) => countItem(item, count)));
+  }
+  const kinds = new Map<string, number>();
+  for (const { item, count } of whole) {
+    kinds.set(itemKind(item), (kinds.get(itemKind(item)) ?? 0) + count);
+  }
+  return joinWords([...kinds].map(([kind, count]) => countItem(kind, count)));
 }
 
 /** "2 more than were cut. Count the piles again?"; null while the counts agree. */

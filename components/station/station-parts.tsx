@@ -5,6 +5,7 @@ import { StepDiagram } from '@/components/diagrams/step-diagram';
 import { Controls } from '@/components/station/controls';
 import { lossControl } from '@/components/station/losses';
 import { countReady } from '@/components/station/pick-step';
+import { StationHeader } from '@/components/station/station-header';
 import type { StationTools } from '@/components/station/station-tools';
 import { StepChips } from '@/components/station/step-chips';
 import type { OpenDialog } from '@/components/station/step-dialogs';
@@ -15,6 +16,7 @@ import { TallyPanel } from '@/components/station/tally-panel';
 import { undoLabel } from '@/components/station/undo-label';
 import { failureTitle } from '@/components/station/use-station-acts';
 import type { TallyInput } from '@/components/station/use-tally-input';
+import { IconButton } from '@/components/ui/icon-button';
 import { Note } from '@/components/ui/note';
 import { StationSwitcher } from '@/components/ui/station-switcher';
 import { type Station, STATIONS } from '@/shared/model/codes';
@@ -38,6 +40,25 @@ export interface StationPartsProps {
   onOpen: (dialog: OpenDialog) => void;
 }
 
+/** Back, project and step, and the tools. */
+export function Head(props: StationPartsProps) {
+  const { reading, tools, progress, onOpen } = props;
+  return (
+    <StationHeader
+      projectId={reading.project.id}
+      projectName={reading.project.name}
+      stepText={stepText(props)}
+      tools={tools}
+      onSteps={progress.steps.length > 1 ? () => onOpen('steps') : null}
+    />
+  );
+}
+
+/** "Step 4 of 18" */
+export function stepText({ reading, progress }: Pick<StationPartsProps, 'reading' | 'progress'>) {
+  return `Step ${reading.step.position} of ${progress.steps.length}`;
+}
+
 /** Tabs for the stations that the plan has steps for. */
 export function Switcher({ reading, progress, onStation }: StationPartsProps) {
   const stations = STATIONS.filter((each) =>
@@ -55,10 +76,10 @@ export function Switcher({ reading, progress, onStation }: StationPartsProps) {
 
 /** What to do, and what the last act failed with. */
 export function Instruction(props: StationPartsProps) {
-  const { reading, lane, title, titleRef, failure, onOpen, onChooseLane } = props;
+  const { reading, lane, title, titleRef, failure, onChooseLane } = props;
   return (
     <View>
-      <StepHead title={title} titleRef={titleRef} onAbout={() => onOpen('about')} />
+      <StepHead title={title} titleRef={titleRef} />
       {failure ? (
         <Note tone="error" title={failureTitle(failure)} text="Your count is kept." live />
       ) : null}
@@ -83,9 +104,22 @@ export function Drawing(props: StationPartsProps & { height: number }) {
   );
 }
 
-export function Row({ reading, progress, onGo }: StationPartsProps) {
+/** A caution or what comes next, and the way to all there is to know about the step. */
+export function Row({ reading, progress, onGo, onOpen }: StationPartsProps) {
   const { plan, step, progress: own } = reading;
-  return <StepLine step={step} steps={plan.steps} progress={progress} own={own} onGo={onGo} />;
+  return (
+    <View style={styles.row}>
+      <View style={styles.grow}>
+        <StepLine step={step} steps={plan.steps} progress={progress} own={own} onGo={onGo} />
+      </View>
+      <IconButton
+        icon="info"
+        label="About this step"
+        onPress={() => onOpen('about')}
+        testID="about"
+      />
+    </View>
+  );
 }
 
 export function CountControls(props: StationPartsProps) {
@@ -122,4 +156,8 @@ export function Tally(props: StationPartsProps & { minHeight: number }) {
   );
 }
 
-const styles = StyleSheet.create({ chips: { paddingHorizontal: 4 } });
+const styles = StyleSheet.create({
+  chips: { paddingHorizontal: 4 },
+  row: { flexDirection: 'row', alignItems: 'center', gap: 4 },
+  grow: { flex: 1, minWidth: 0 },
+});

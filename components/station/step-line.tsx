@@ -23,7 +23,7 @@ interface StepLineProps {
 export function StepLine({ step, steps, progress, own, onGo }: StepLineProps) {
   const outrun = outrunText(own, step);
   if (outrun) return <Line icon="triangle" color="weldInk" text={outrun} live />;
-  const next = nextStep(progress.steps, own);
+  const next = nextStep(steps, progress.steps, own);
   const nextPlan = steps.find(({ key }) => key === next?.key);
   const goesOn =
     next !== null && (own.toGo === 0 || (step.station === 'machine' && next.ready > 0));

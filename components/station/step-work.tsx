@@ -3,7 +3,6 @@ import { useEffect, useRef, useState } from 'react';
 import type { Text } from 'react-native';
 
 import { useSettings } from '@/components/providers/settings';
-import { useToastOffset } from '@/components/providers/toast';
 import { SafetyCheck } from '@/components/safety/safety-check';
 import { isCutting } from '@/components/safety/safety-rules';
 import { useCuttingVisit } from '@/components/safety/use-cutting-visit';
@@ -15,8 +14,6 @@ import type { StepReading } from '@/components/station/step-reading';
 import { useStationActs } from '@/components/station/use-station-acts';
 import { useTallyInput } from '@/components/station/use-tally-input';
 import { stepTitle } from '@/components/steps/messages';
-import { size } from '@/components/ui/theme';
-import { useLayout } from '@/components/ui/use-layout';
 import type { Station } from '@/shared/model/codes';
 import type { Progress, StepProgress } from '@/shared/model/tally';
 
@@ -38,11 +35,9 @@ export function StepWork({ reading, progress, tools, onGo, onStation }: StepWork
   const { counts, answer, closeAnswer, failure } = useStationActs(project.id, step.key);
   const lane = counts.laneOf(own);
   const title = stepTitle(step);
-  const { kind, height } = useLayout();
 
   usePageTitle(`${title} · ${project.name}`, heading);
   useEffect(() => heading.current?.focus(), [step.key, visit.checkOpen]);
-  useToastOffset(kind === 'phone' ? height * size.tallyMinShare : 0);
   const focused = useIsFocused();
   const over = open !== null || counts.asked !== null || answer !== null;
   const undo = () => counts.acts.undo(lane?.lane.key ?? null);

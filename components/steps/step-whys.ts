@@ -26,11 +26,11 @@ export const STEP_WHYS: Record<StepRole, WhyText> = {
       ? `Turn the wide end under over a round template, ${formatInches(request.tip.turnUnder)} all round, and press. The wedge now reaches ${formatInches(geometry.ring.reach)} from the plate’s centre.`
       : `Turn the tip right side out, push the corner out, and press with the seam on the middle of the back. The point is a right angle and reaches ${formatInches(geometry.ring.reach)} from the plate’s centre.`,
   pair: ({ request, geometry }) =>
-    `Right sides together, folded ends level, ${formatInches(request.seam)} seam. Begin at the folded end with a backstitch and sew to the narrow edge; do not cut the thread before the next pair. ${shoulderText(geometry.ring.shoulderRadius)}`,
+    `Right sides together, ${outerEnd(request)}s level, ${formatInches(request.seam)} seam. Begin at the ${outerEnd(request)} with a backstitch and sew to the narrow edge; do not cut the thread before the next pair.${shoulderText(geometry.ring.shoulderRadius)}`,
   quarter: ({ request, geometry: { ring } }) =>
-    `A quarter of the ring reads ${ring.order.join(' ')} clockwise, over and over. Sew the pairs in that order, from the folded ends inward, ${formatInches(request.seam)} seam.`,
+    `A quarter of the ring reads ${ring.order.join(' ')} clockwise, over and over. Sew the pairs in that order, from the ${outerEnd(request)}s inward, ${formatInches(request.seam)} seam.`,
   half: ({ request }) =>
-    `Two of these make a plate. Lay the units out clockwise and read the letters before sewing, ${formatInches(request.seam)} seam, from the folded ends inward.`,
+    `Two of these make a plate. Lay the units out clockwise and read the letters before sewing, ${formatInches(request.seam)} seam, from the ${outerEnd(request)}s inward.`,
   ring: ({ request, geometry: { ring } }) =>
     `Lay both halves together flat before the last seams. A cup or a gap shows now, while it is easy to take a seam in. The closed ring has ${request.wedges} wedges and reaches ${formatInches(ring.reach)} from its centre.`,
   'ring-press': ({ request }) =>
@@ -59,8 +59,13 @@ export const STEP_WHYS: Record<StepRole, WhyText> = {
     `Measure from the centre, the same to all four sides: ${formatInches(background.trim)} square now, ${formatInches(request.block)} once it is sewn into a quilt.`,
 };
 
+/** Where side seams begin: a tip is folded, a flat wedge is not. */
+function outerEnd({ tip }: Plan['request']): string {
+  return tip.shape === 'flat' ? 'wide end' : 'folded end';
+}
+
 function shoulderText(radius: TemplateLength | null): string {
-  return radius === null ? '' : `The shoulders meet ${inches(radius)} from the plate’s centre.`;
+  return radius === null ? '' : ` The shoulders meet ${inches(radius)} from the plate’s centre.`;
 }
 
 function marginText(margin: Plan['geometry']['ring']['margin']): string {

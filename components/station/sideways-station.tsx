@@ -1,0 +1,57 @@
+import { ScrollView, StyleSheet, View } from 'react-native';
+import { useSafeAreaInsets } from 'react-native-safe-area-context';
+
+import { useToastOffset } from '@/components/providers/toast';
+import {
+  CountControls,
+  Drawing,
+  Head,
+  Instruction,
+  Row,
+  type StationPartsProps,
+  Switcher,
+  Tally,
+} from '@/components/station/station-parts';
+import { pageEdge, useTheme } from '@/components/ui/theme';
+import { useLayout } from '@/components/ui/use-layout';
+
+const DIAGRAM_SHARE = 0.38;
+const LEAST_DIAGRAM_PX = 96;
+const HEADER_PX = 52;
+const CONTROLS_PX = 68;
+
+/** A phone on its side: diagram on the left, tally on the right at half the width. */
+export function SidewaysStation(props: StationPartsProps) {
+  const { color } = useTheme();
+  const { height } = useLayout();
+  const insets = useSafeAreaInsets();
+  useToastOffset(0);
+  const edges = { paddingLeft: insets.left, paddingRight: insets.right };
+  const zone = Math.max(0, height - HEADER_PX - CONTROLS_PX - insets.bottom);
+  return (
+    <View role="main" style={[styles.page, edges, { backgroundColor: color.paper }]}>
+      <Head {...props} />
+      <View style={[styles.columns, props.leftHanded && styles.mirrored]}>
+        <ScrollView style={styles.half} contentContainerStyle={styles.edge}>
+          <Switcher {...props} />
+          <Instruction {...props} />
+          <Drawing {...props} height={Math.max(LEAST_DIAGRAM_PX, height * DIAGRAM_SHARE)} />
+          <Row {...props} />
+        </ScrollView>
+        <View style={[styles.half, styles.counting]}>
+          <Tally {...props} minHeight={zone} />
+          <CountControls {...props} />
+        </View>
+      </View>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  page: { flex: 1 },
+  columns: { flex: 1, flexDirection: 'row', minHeight: 0 },
+  mirrored: { flexDirection: 'row-reverse' },
+  half: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
+  counting: { gap: 6, paddingRight: 6, paddingBottom: 6 },
+  edge: { paddingHorizontal: pageEdge.phone },
+});
