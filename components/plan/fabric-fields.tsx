@@ -49,13 +49,13 @@ export function FabricFields({ setup }: { setup: Setup }) {
         style={styles.add}
         testID="add-fabric"
       />
-      <Txt kind="section" heading={2}>
+      <Txt kind="section" heading={2} style={styles.next}>
         Background
       </Txt>
       <View role="list">{row(wedges)}</View>
       {fabrics.length > wedges + 1 ? (
         <>
-          <Txt kind="section" heading={2}>
+          <Txt kind="section" heading={2} style={styles.next}>
             Circle
           </Txt>
           <View role="list">{row(wedges + 1)}</View>
@@ -69,4 +69,5 @@ export function FabricFields({ setup }: { setup: Setup }) {
 const styles = StyleSheet.create({
   fields: { gap: space[2] },
   add: { borderStyle: 'dashed' },
+  next: { marginTop: space[2] },
 });

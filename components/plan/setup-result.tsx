@@ -70,7 +70,11 @@ const Figures = memo(function Figures({ plan, dim, change }: FiguresProps) {
           </View>
         </View>
         <View
-          style={[styles.card, { backgroundColor: color.card, borderColor: color.line }]}
+          style={[
+            styles.card,
+            wide && styles.wideCard,
+            { backgroundColor: color.card, borderColor: color.line },
+          ]}
           testID="fabric-table"
         >
           <FabricTable plan={plan} />
@@ -98,12 +102,10 @@ const styles = StyleSheet.create({
   picture: { alignItems: 'center', gap: space[2] },
   facts: { width: '100%', minWidth: 256, maxWidth: 420 },
   card: {
-    flexGrow: 1,
-    flexShrink: 1,
-    flexBasis: 340,
     borderWidth: border.hair,
     borderRadius: radius.card,
     paddingHorizontal: 14,
     paddingVertical: 8,
   },
+  wideCard: { flexGrow: 1, flexShrink: 1, flexBasis: 340 },
 });

@@ -1,12 +1,12 @@
 import { type Fraction } from 'fraction.js';
 
 import { joinWords } from '@/components/station/enough-text';
-import { countItem, itemKind } from '@/components/steps/item-words';
+import { countItem, itemKind, itemLetters } from '@/components/steps/item-words';
 import type { PlanStep } from '@/shared/model/plan';
 import { formatFraction } from '@/shared/units/format-fraction';
 import { toFraction, toText } from '@/shared/units/fraction';
 
-const MOST_NAMED = 4;
+const MOST_NAMED = 2;
 
 type Amounts = Map<string, Fraction>;
 
@@ -20,12 +20,25 @@ function writeAmount([item, amount]: [string, Fraction]): string {
   return whole ? words : words.replace(/^2/, formatFraction(toText(amount)));
 }
 
-/** Few items by their letters, many by their kind. */
+/** Items of one kind: by their letters while they are few or alike, else all together. */
+function writeKind(kind: string, items: readonly [string, Fraction][]): string[] {
+  const [first, ...rest] = items;
+  if (!first) return [];
+  if (items.length <= MOST_NAMED) return items.map(writeAmount);
+  if (rest.every(([, amount]) => amount.equals(first[1]))) {
+    const letters = joinWords(items.map(([item]) => itemLetters(item)));
+    return [`${writeAmount([kind, first[1]])} each in ${letters}`];
+  }
+  return [writeAmount([kind, rest.reduce((sum, [, amount]) => sum.add(amount), first[1])])];
+}
+
 function writeAmounts(amounts: Amounts): string {
-  if (amounts.size <= MOST_NAMED) return joinWords([...amounts].map(writeAmount));
-  const kinds: Amounts = new Map();
-  for (const [item, amount] of amounts) add(kinds, itemKind(item), amount);
-  return joinWords([...kinds].map(writeAmount));
+  const kinds = new Map<string, [string, Fraction][]>();
+  for (const entry of amounts) {
+    const kind = itemKind(entry[0]);
+    kinds.set(kind, [...(kinds.get(kind) ?? []), entry]);
+  }
+  return joinWords([...kinds].flatMap(([kind, items]) => writeKind(kind, items)));
 }
 
 /** "Uses 40 turned tips. Makes 20 pairs in A+C and 20 pairs in D+E." for a whole step. */

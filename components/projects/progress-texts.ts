@@ -1,4 +1,5 @@
-import { joinWords, laneLetters, waitingText } from '@/components/station/enough-text';
+import { joinWords, laneLetters } from '@/components/station/enough-text';
+import { countItem, itemKind } from '@/components/steps/item-words';
 import { madeWord, unitWord } from '@/components/steps/messages';
 import type { LaneProgress, StepProgress } from '@/shared/model/tally';
 
@@ -43,10 +44,24 @@ function enoughLine(step: StepProgress): string {
   return `Enough for ${joinWords([first ?? '', ...rest])}`;
 }
 
+/** "Waiting for 48 turned tips and 5 circles": fabrics of one kind together. */
+function waitingLine({ waitingFor }: StepProgress): string {
+  const kinds = new Map<string, StepProgress['waitingFor']>();
+  for (const each of waitingFor) {
+    const kind = itemKind(each.item);
+    kinds.set(kind, [...(kinds.get(kind) ?? []), each]);
+  }
+  const words = [...kinds].map(([kind, items]) => {
+    const missing = items.reduce((sum, item) => sum + Math.ceil(item.missing), 0);
+    return countItem(items.length === 1 ? (items[0]?.item ?? kind) : kind, missing);
+  });
+  return words.length > 0 ? `Waiting for ${joinWords(words)}` : 'Nothing on hand yet';
+}
+
 /** One line on where a step stands: what is done, what can be done now, or what it waits for. */
 export function stepLine(step: StepProgress): string {
   if (step.toGo === 0) return `All ${countLine(step).replace(/^\d+ of /, '')}`;
-  if (!isReady(step)) return waitingText(step);
+  if (!isReady(step)) return waitingLine(step);
   const fromCloth = step.lanes.every(({ possible }) => possible === null);
   return fromCloth || step.role === 'cut' ? countLine(step) : enoughLine(step);
 }

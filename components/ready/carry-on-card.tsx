@@ -35,7 +35,8 @@ export function CarryOnCard({ carryOn }: { carryOn: CarryOn }) {
   const planned = project.steps.find(({ key }) => key === step?.key);
   const open = () =>
     router.push(step ? stationHref(project.id, station, step.role) : `/projects/${project.id}`);
-  const picture = <BlockDrawing plan={plan} size={286} letters={false} onDark backgroundless />;
+  const size = wide ? 286 : 226;
+  const picture = <BlockDrawing plan={plan} size={size} letters={false} onDark backgroundless />;
   return (
     <View
       style={[styles.card, { backgroundColor: dye.fill, borderColor: dye.ink }]}
@@ -96,9 +97,9 @@ const styles = StyleSheet.create({
     gap: 14,
     overflow: 'hidden',
   },
-  corner: { position: 'absolute', top: -46, right: -70 },
+  corner: { position: 'absolute', top: -34, right: -56 },
   middle: { alignItems: 'center' },
-  left: { minHeight: 150, paddingRight: 150 },
+  left: { minHeight: 164, paddingRight: 146 },
   now: { gap: 10 },
   task: { flexDirection: 'row', alignItems: 'center', gap: 10 },
   grow: { flex: 1 },

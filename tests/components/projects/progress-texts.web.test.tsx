@@ -52,6 +52,10 @@ it('starts from cloth without waiting for anything', () => {
 
 it('says what a step waits for', () => {
   expect(stepLine(read('ring'))).toBe('Waiting for 10 halves');
+  expect(stepLine(read('pair'))).toBe('Waiting for 80 turned tips');
+  expect(stepLine(read('applique'))).toBe(
+    'Waiting for 5 pressed rings, 5 turned circles and 5 folded backgrounds',
+  );
 });
 
 it('says what is enough on hand, by lane while the lanes are few', async () => {

@@ -163,7 +163,9 @@ describe('a project’s plan', () => {
     expect(text()).toContain('17 × 5 in left');
     expect(text()).toContain('2 strips 13½ in');
     expect(text()).toContain('20 cuts × 5 = 100 pieces');
-    expect(text()).toContain('Uses 5 stacks in A+B+C+D+E. Makes 100 wedges.');
+    expect(text()).toContain(
+      'Uses 5 stacks in A+B+C+D+E. Makes 20 wedges each in A, B, C, D and E.',
+    );
     expect(text()).toContain(`${steps.length}. Trim the block`);
     expect(text()).toContain('No slack in Cloth B.');
   });
