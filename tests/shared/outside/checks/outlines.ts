@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 
 import { finishedHalfWidth } from '../../../../shared/geometry/finished-half-width';
 import { offsetPolygon } from '../../../../shared/geometry/offset-polygon';

@@ -1,0 +1,38 @@
+import { group } from '../group.mjs';
+
+export const GEOMETRY = group(
+  'geometry',
+  ['tests/shared/geometry/[^/]+$', 'tests/shared/outside'],
+  [
+    ['background-square', 'block.add(seam.mul(2))', 'block.add(seam)'],
+    ['background-square', 'trim.add(trimAllowance)', 'trim.sub(trimAllowance)'],
+    ['centre-circle', '2 * (finishedRadiusIn + turningIn)', '2 * finishedRadiusIn + turningIn'],
+    ['centre-circle', "ROOM_AROUND_CIRCLE = '1/4'", "ROOM_AROUND_CIRCLE = '1/2'"],
+    ['chord-margin', 'reachIn / Math.cos', 'reachIn * Math.cos'],
+    ['cut-half-width', 'seamIn / Math.cos', 'seamIn * Math.cos'],
+    ['cut-half-width', ') + seamIn', ') - seamIn'],
+    ['finished-half-width', 'Math.tan', 'Math.sin'],
+    ['finished-reach', '.sub(wideTurning)', '.add(wideTurning)'],
+    ['folded-raw-width', '(1 + Math.tan', '(1 - Math.tan'],
+    ['half-angle', 'Math.PI / wedgeCount', '(2 * Math.PI) / wedgeCount'],
+    ['half-angle', 'wedgeCount < 3', 'wedgeCount <= 3'],
+    ['hole-corner', ') / Math.cos', ') * Math.cos'],
+    ['margin-on-folds', 'reachIn * Math.cos', 'reachIn * Math.sin'],
+    [
+      'offset-polygon',
+      'along[1] / length, -along[0] / length',
+      '-along[1] / length, along[0] / length',
+    ],
+    ['offset-polygon', 'edges.at(index - 1)', 'edges.at(index - 2)'],
+    ['polygon-area', '- nextX * y', '+ nextX * y'],
+    ['ring-area', 'reachIn ** 2 - holeIn ** 2', 'reachIn ** 2 + holeIn ** 2'],
+    ['ring-area', 'Math.PI / 2', 'Math.PI / 4'],
+    ['row-drift', '(pieces - 1)', 'pieces'],
+    ['row-drift', '2 * perEdgeIn', 'perEdgeIn'],
+    ['seam-drift', 'Math.sin', 'Math.tan'],
+    ['shoulder', 'const atIn = reachIn / (1 + tan)', 'const atIn = reachIn / (1 - tan)'],
+    ['shoulder', '(Math.cos(theta) + Math.sin(theta))', '(Math.cos(theta) + Math.tan(theta))'],
+    ['tip-flap', 'reachIn - cutHalfWidth', 'reachIn + cutHalfWidth'],
+    ['wedge-outline', '[wideAtIn, -wide]', '[wideAtIn, -narrow]'],
+  ],
+);
