@@ -112,7 +112,7 @@ function CheckTitle(props: { titleRef: Ref<Text>; all: number; done: number }) {
   const { titleRef, all, done } = props;
   return (
     <View style={styles.title}>
-      <Txt kind="display" heading={1} tabIndex={-1} ref={titleRef}>
+      <Txt kind="display" heading={1} tabIndex={-1} ref={titleRef} style={styles.heading}>
         Before you cut
       </Txt>
       <View style={styles.sub}>
@@ -176,6 +176,7 @@ const styles = StyleSheet.create({
   page: { flex: 1 },
   inside: { width: '100%', maxWidth: 640, alignSelf: 'center', paddingBottom: 12 },
   title: { paddingHorizontal: 20, paddingTop: 4, paddingBottom: 12, gap: 6 },
+  heading: { borderRadius: 6 },
   sub: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'space-between', columnGap: 12 },
   strong: { fontFamily: font.bold },
   beneath: { paddingHorizontal: 20, paddingTop: 12, gap: 10 },

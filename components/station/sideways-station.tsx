@@ -18,7 +18,7 @@ import { useLayout } from '@/components/ui/use-layout';
 const DIAGRAM_SHARE = 0.38;
 const LEAST_DIAGRAM_PX = 96;
 const HEADER_PX = 52;
-const CONTROLS_PX = 68;
+const EDGE_PX = 6;
 
 /** A phone on its side: diagram on the left, tally on the right at half the width. */
 export function SidewaysStation(props: StationPartsProps) {
@@ -27,20 +27,24 @@ export function SidewaysStation(props: StationPartsProps) {
   const insets = useSafeAreaInsets();
   useToastOffset(0);
   const edges = { paddingLeft: insets.left, paddingRight: insets.right };
-  const zone = Math.max(0, height - HEADER_PX - CONTROLS_PX - insets.bottom);
+  const zone = Math.max(0, height - HEADER_PX - EDGE_PX - insets.bottom);
   return (
     <View role="main" style={[styles.page, edges, { backgroundColor: color.paper }]}>
       <Head {...props} />
       <View style={[styles.columns, props.leftHanded && styles.mirrored]}>
-        <ScrollView style={styles.half} contentContainerStyle={styles.edge}>
-          <Switcher {...props} />
-          <Instruction {...props} />
-          <Drawing {...props} height={Math.max(LEAST_DIAGRAM_PX, height * DIAGRAM_SHARE)} />
-          <Row {...props} />
-        </ScrollView>
+        <View style={styles.half}>
+          <ScrollView style={styles.reading} contentContainerStyle={styles.edge}>
+            <Switcher {...props} />
+            <Instruction {...props} />
+            <Drawing {...props} height={Math.max(LEAST_DIAGRAM_PX, height * DIAGRAM_SHARE)} />
+            <Row {...props} />
+          </ScrollView>
+          <View style={[styles.edge, styles.controls]}>
+            <CountControls {...props} />
+          </View>
+        </View>
         <View style={[styles.half, styles.counting]}>
           <Tally {...props} minHeight={zone} />
-          <CountControls {...props} />
         </View>
       </View>
     </View>
@@ -52,6 +56,8 @@ const styles = StyleSheet.create({
   columns: { flex: 1, flexDirection: 'row', minHeight: 0 },
   mirrored: { flexDirection: 'row-reverse' },
   half: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
-  counting: { gap: 6, paddingRight: 6, paddingBottom: 6 },
+  counting: { paddingRight: EDGE_PX, paddingBottom: EDGE_PX },
+  reading: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
+  controls: { paddingTop: 4, paddingBottom: EDGE_PX },
   edge: { paddingHorizontal: pageEdge.phone },
 });

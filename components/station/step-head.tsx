@@ -13,5 +13,5 @@ export function StepHead({ title, titleRef }: { title: string; titleRef: Ref<Tex
 }
 
 const styles = StyleSheet.create({
-  title: { paddingHorizontal: 4, paddingVertical: 6, borderRadius: 6 },
+  title: { paddingVertical: 6, borderRadius: 6 },
 });

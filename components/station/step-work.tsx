@@ -37,7 +37,12 @@ export function StepWork({ reading, progress, tools, onGo, onStation }: StepWork
   const title = stepTitle(step);
 
   usePageTitle(`${title} · ${project.name}`, heading);
-  useEffect(() => heading.current?.focus(), [step.key, visit.checkOpen]);
+  // the check and the work behind it take turns; the page's own first focus is the shell's
+  const checkBefore = useRef(false);
+  useEffect(() => {
+    if (visit.checkOpen || checkBefore.current) heading.current?.focus();
+    checkBefore.current = visit.checkOpen;
+  }, [visit.checkOpen]);
   const focused = useIsFocused();
   const over = open !== null || counts.asked !== null || answer !== null;
   const undo = () => counts.acts.undo(lane?.lane.key ?? null);

@@ -21,9 +21,12 @@ import { useLayout } from '@/components/ui/use-layout';
 
 const STEPS_PX = 316;
 const TALLY_PX = 340;
-const DIAGRAM_PX = 150;
+const LEAST_DIAGRAM_PX = 96;
+const MOST_STACKED_PX = 220;
 /** Top row, instruction, chips and row of a desk page, which the diagram leaves room for. */
-const AROUND_DIAGRAM_PX = 350;
+const AROUND_DIAGRAM_PX = 370;
+/** The same, with the controls, where the tally stands below. */
+const AROUND_STACKED_PX = 376;
 
 interface WideStationProps extends StationPartsProps {
   /** room for the diagram beside the tally */
@@ -36,8 +39,9 @@ export function WideStation({ desk, ...props }: WideStationProps) {
   const { height } = useLayout();
   const [countingPx, setCountingPx] = useState(0);
   useToastOffset(desk ? 0 : countingPx);
-  const diagram = desk ? Math.max(DIAGRAM_PX, height - AROUND_DIAGRAM_PX) : DIAGRAM_PX;
   const leastZone = height * size.tallyMinShare;
+  const left = height - (desk ? AROUND_DIAGRAM_PX : AROUND_STACKED_PX + leastZone);
+  const diagram = Math.max(LEAST_DIAGRAM_PX, desk ? left : Math.min(MOST_STACKED_PX, left));
   return (
     <View style={[styles.page, { backgroundColor: color.paper }]}>
       <PlacesRail here="projects" />

@@ -2,9 +2,9 @@ import type { Caution, Mistake } from '@/shared/model/codes';
 
 /** One line each: what to do, never more. */
 export const CAUTION_TEXTS: Record<Caution, string> = {
-  bladeClosed: 'Close the blade each time you set it down.',
-  fingersClear: 'Hand flat, fingers clear of the ruler’s edge.',
-  needle: 'Fingers clear of the needle. Foot off the pedal to thread.',
+  bladeClosed: 'Blade closed when you set it down.',
+  fingersClear: 'Fingers clear of the ruler’s edge.',
+  needle: 'Fingers clear of the needle’s line.',
   pinsOut: 'Take each pin out before the needle reaches it.',
   ironHeel: 'Iron on its heel, off when you leave.',
   ironClear: 'Keep the iron clear of mat and ruler.',
