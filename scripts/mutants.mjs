@@ -44,6 +44,20 @@ async function tryMutant(tree, mutant) {
   });
 }
 
+/** What must not count as caught, or the verdicts would be worth nothing. */
+async function tryControls(tree) {
+  const file = 'shared/geometry/row-drift.ts';
+  for (const replace of ['return null.value;', 'return throw;', 'return 2 * perEdgeIn;;;']) {
+    const control = { file, find: 'return 2 * perEdgeIn * (pieces - 1);', replace };
+    const { state } = await withMutant(tree, control, () =>
+      runTests(tree, 'tests/shared/geometry/ring', stop.signal),
+    );
+    const wanted = replace.includes('perEdgeIn') ? 'caught' : 'crashed';
+    if (state !== wanted && !stop.signal.aborted)
+      fail(`CONTROL ${replace} ${state}, not ${wanted}`);
+  }
+}
+
 async function work(tree, queue, results) {
   for (let mutant = queue.shift(); mutant; mutant = queue.shift()) {
     const verdict = await tryMutant(tree, mutant);
@@ -63,6 +77,8 @@ async function main() {
   trees.push(...Array.from({ length: WORKERS }, () => makeTree(ROOT)));
   const whole = await runTests(trees[0], ALL_TESTS, stop.signal);
   if (whole.state !== 'passed') return fail(`The tests fail without any mutant: ${whole.by}`);
+  await tryControls(trees[0]);
+  if (process.exitCode) return;
   const results = [];
   const queue = [...mutants];
   await Promise.all(trees.map((tree) => work(tree, queue, results)));

@@ -27,6 +27,7 @@ async function start() {
   const env = { ...(await openDatabase()), WEB_DIST: web };
   await migrateAndSeed(server, env);
   const port = await choosePort();
+  if (!process.env.PORT && port !== USUAL_PORT) say(`Port ${USUAL_PORT} is taken: using ${port}.`);
   const { ended } = await startServer(server, port, env);
   const url = `http://127.0.0.1:${port}`;
   noteAddress(url);
