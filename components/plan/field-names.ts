@@ -34,7 +34,7 @@ export type FieldName =
 export type FieldErrors = Partial<Record<FieldName, string>>;
 
 /** The form's fields in reading order, so that the first wrong one can be found. */
-export const FIELD_ORDER: readonly FieldName[] = [
+const FIELD_ORDER: readonly FieldName[] = [
   'block',
   'blocks',
   'wedges',

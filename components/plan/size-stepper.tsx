@@ -15,10 +15,15 @@ interface SizeStepperProps {
   hint?: string;
 }
 
+/** Layers that are left to the plan are stepped from what the plan came to. */
+function deepest({ good }: Setup): string {
+  return String(Math.max(1, ...(good?.plan.stacks ?? []).map(({ perCut }) => perCut)));
+}
+
 /** One size of the form: typed or stepped, with the way back to the default it would follow. */
 export function SizeStepper({ setup, field, label, unit, hint }: SizeStepperProps) {
   const text = setup.shownText(field);
-  const lastGood = setup.good ? writeSize(field, setup.good.request) : '';
+  const lastGood = setup.good ? writeSize(field, setup.good.request) || deepest(setup) : '';
   const stepped = (by: 1 | -1) => stepSize(field, text, by) ?? stepSize(field, lastGood, by);
   const step = (by: 1 | -1) => {
     const next = stepped(by);

@@ -109,4 +109,13 @@ describe('defaults', () => {
     await click(named('60 mm'));
     expect(valueOf('cap')).toBe('6');
   });
+
+  it('leave the layers of a stack to the plan, and step from what it came to', async () => {
+    await open();
+    expect(valueOf('layers')).toBe('');
+    await click(named('Less, Layers a stack'));
+    expect(valueOf('layers')).toBe('3');
+    await click(named('Back to the default, Layers a stack'));
+    expect(valueOf('layers')).toBe('');
+  });
 });
