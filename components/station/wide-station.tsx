@@ -20,6 +20,7 @@ import { Txt } from '@/components/ui/txt';
 import { useLayout } from '@/components/ui/use-layout';
 
 const STEPS_PX = 316;
+const BOTTOM_PX = 24;
 const TALLY_PX = 340;
 const LEAST_DIAGRAM_PX = 96;
 const MOST_STACKED_PX = 220;
@@ -38,7 +39,7 @@ export function WideStation({ desk, ...props }: WideStationProps) {
   const { color } = useTheme();
   const { height } = useLayout();
   const [countingPx, setCountingPx] = useState(0);
-  useToastOffset(desk ? 0 : countingPx);
+  useToastOffset(desk ? 0 : countingPx + BOTTOM_PX);
   const leastZone = height * size.tallyMinShare;
   const left = height - (desk ? AROUND_DIAGRAM_PX : AROUND_STACKED_PX + leastZone);
   const diagram = Math.max(LEAST_DIAGRAM_PX, desk ? left : Math.min(MOST_STACKED_PX, left));
@@ -111,7 +112,7 @@ const styles = StyleSheet.create({
     paddingLeft: pageEdge.wide,
     paddingRight: 18,
     paddingTop: 16,
-    paddingBottom: 24,
+    paddingBottom: BOTTOM_PX,
     gap: 12,
   },
   top: { flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', gap: 12 },

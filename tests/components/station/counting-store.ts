@@ -9,7 +9,11 @@ let made = 0;
 let nowMs = 1_800_000_000_000;
 const random16 = async () => new Uint8Array(16).map((_, at) => (at === 15 ? made : at));
 
-/** The store itself over SQLite in memory, so that a page is tested on what a device really does. */
+/**
+ * The store itself over SQLite in memory, so that a page is tested on what a device really does.
+ *
+ * @public taken by jest.mock
+ */
 export const projects: ProjectsClient = createLocalClient({
   open: async () => openNodeDatabase(':memory:'),
   tools: {
