@@ -7,7 +7,6 @@ import { SizeStepper } from '@/components/plan/size-stepper';
 import type { Setup } from '@/components/plan/use-setup';
 import { Button } from '@/components/ui/button';
 import { space } from '@/components/ui/theme';
-import { webOnly } from '@/components/ui/web-only';
 
 /** The sizes that follow by themselves; open when one of them is wrong. */
 export function MoreFields({ setup }: { setup: Setup }) {
@@ -17,15 +16,14 @@ export function MoreFields({ setup }: { setup: Setup }) {
   const margin = setup.good && writeLength(setup.good.plan.geometry.ring.margin);
   return (
     <View style={styles.fields}>
-      <View {...webOnly({ 'aria-controls': 'more-sizes' })} aria-expanded={open}>
-        <Button
-          label={open ? 'Fewer sizes' : 'More sizes'}
-          icon={open ? 'minus' : 'plus'}
-          kind="second"
-          onPress={() => setWanted(!open)}
-          testID="more"
-        />
-      </View>
+      <Button
+        label={open ? 'Fewer sizes' : 'More sizes'}
+        icon={open ? 'minus' : 'plus'}
+        kind="second"
+        expands={{ id: 'more-sizes', open }}
+        onPress={() => setWanted(!open)}
+        testID="more"
+      />
       {open ? (
         <View id="more-sizes" style={styles.row}>
           <SizeStepper

@@ -4,7 +4,7 @@ import { darken } from '@/components/ui/darken';
 import { Icon, type IconName } from '@/components/ui/icon';
 import { border, radius, size, type Theme, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
-import { pressable } from '@/components/ui/web-only';
+import { pressable, webOnly } from '@/components/ui/web-only';
 import type { Station } from '@/shared/model/codes';
 
 export type ButtonKind = 'main' | 'station' | 'second' | 'quiet' | 'danger';
@@ -24,6 +24,8 @@ export interface ButtonProps extends Action {
   /** something is missing first: the label says what, and pressing points to it */
   waiting?: boolean | undefined;
   accessibilityLabel?: string | undefined;
+  /** whether what it opens is open, and that thing's id */
+  expands?: { id: string; open: boolean } | undefined;
   style?: StyleProp<ViewStyle>;
 }
 
@@ -68,6 +70,10 @@ export function Button(props: ButtonProps) {
       onPress={props.onPress}
       {...(props.testID && { testID: props.testID })}
       {...(props.accessibilityLabel && { 'aria-label': props.accessibilityLabel })}
+      {...(props.expands && {
+        'aria-expanded': props.expands.open,
+        ...webOnly({ 'aria-controls': props.expands.id }),
+      })}
       style={({ pressed }) => [
         styles.button,
         small && styles.small,

@@ -77,6 +77,7 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     alignItems: 'center',
     alignSelf: 'flex-start',
+    maxWidth: '100%',
     gap: 7,
   },
   tall: { minHeight: size.syncChip, borderRadius: 18 },

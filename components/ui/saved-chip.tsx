@@ -1,4 +1,4 @@
-import { View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 
 import { useStoreStatus } from '@/components/providers/use-store-status';
 import { Chip, type ChipProps } from '@/components/ui/chip';
@@ -16,8 +16,10 @@ function words(status: StoreStatus): ChipProps {
 /** Where the counts are; without an account they are on this device and nowhere else. */
 export function SavedChip() {
   return (
-    <View role="status" testID="saved-chip">
+    <View role="status" testID="saved-chip" style={styles.place}>
       <Chip tall {...words(useStoreStatus())} />
     </View>
   );
 }
+
+const styles = StyleSheet.create({ place: { maxWidth: '100%' } });

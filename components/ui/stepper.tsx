@@ -44,37 +44,44 @@ export function Stepper(props: StepperProps) {
         style={[styles.box, { backgroundColor: color.card, borderColor: edge }]}
       >
         <End label={`Less, ${label}`} icon="minus" possible={canLess} onStep={() => onStep(-1)} />
-        <TextInput
-          value={value}
-          onChangeText={props.onChangeText}
-          {...(props.onBlur && { onBlur: props.onBlur })}
-          onKeyPress={(event) => stepByKey(event.nativeEvent.key)}
-          inputMode="text"
-          selectTextOnFocus
-          {...(props.testID && { testID: props.testID })}
-          aria-label={unit ? `${label}, ${unit}` : label}
-          {...webOnly({
-            'aria-invalid': error !== undefined,
-            'aria-describedby': error ? `${id}-error` : undefined,
-          })}
-          style={[
-            styles.input,
-            numerals,
-            unit ? styles.besideUnit : null,
-            { color: color.ink, fontSize: 20 * scale },
-          ]}
-        />
-        {unit ? (
-          <Txt kind="lead" hidden style={styles.unit}>
-            {unit}
-          </Txt>
-        ) : null}
-        {unit && scale < 1.3 ? <View style={styles.spacer} /> : null}
+        <View style={styles.middle} {...webOnly({ onClick: focusInput })}>
+          <TextInput
+            value={value}
+            onChangeText={props.onChangeText}
+            {...(props.onBlur && { onBlur: props.onBlur })}
+            onKeyPress={(event) => stepByKey(event.nativeEvent.key)}
+            inputMode="text"
+            selectTextOnFocus
+            {...(props.testID && { testID: props.testID })}
+            aria-label={unit ? `${label}, ${unit}` : label}
+            {...webOnly({
+              'aria-invalid': error !== undefined,
+              'aria-describedby': error ? `${id}-error` : undefined,
+            })}
+            style={[
+              styles.input,
+              numerals,
+              unit ? styles.besideUnit : null,
+              { color: color.ink, fontSize: 20 * scale },
+            ]}
+          />
+          {unit ? (
+            <Txt kind="lead" hidden style={styles.unit}>
+              {unit}
+            </Txt>
+          ) : null}
+          {unit && scale < 1.3 ? <View style={styles.spacer} /> : null}
+        </View>
         <End label={`More, ${label}`} icon="plus" possible={canMore} onStep={() => onStep(1)} />
       </View>
       <FieldError id={`${id}-error`} error={error} />
     </View>
   );
+}
+
+/** The number is narrow beside its unit on a small phone: all between the ends leads to it. */
+function focusInput({ currentTarget }: { currentTarget: unknown }): void {
+  if (currentTarget instanceof Element) currentTarget.querySelector('input')?.focus();
 }
 
 interface EndProps {
@@ -116,6 +123,13 @@ const styles = StyleSheet.create({
     borderRadius: 14,
     alignItems: 'center',
     justifyContent: 'center',
+  },
+  middle: {
+    flex: 1,
+    minWidth: 0,
+    alignSelf: 'stretch',
+    flexDirection: 'row',
+    alignItems: 'center',
   },
   input: {
     flex: 1,

@@ -16,7 +16,7 @@ interface WebProps {
   onMouseLeave?: () => void;
   onFocus?: () => void;
   onBlur?: () => void;
-  onClick?: () => void;
+  onClick?: (event: { currentTarget: unknown }) => void;
   inert?: boolean | undefined;
 }
 
