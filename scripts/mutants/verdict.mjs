@@ -2,30 +2,38 @@
 // time-out would show nothing about the tests.
 const ESCAPES = /\u001b\[\d*m/g;
 const MATCHER = /^(Error|JestAssertionError): expect\(/;
-const PROPERTY = /^Error: Property failed after \d+ tests/;
-const PROPERTY_VERDICT =
-  /Property failed by returning false|(Got|cause\]?:) *(Error|JestAssertionError): expect\(/;
+const PROPERTY_IS_FALSE = /^Error: Property failed after [^]*Property failed by returning false/;
+// fast-check gives an expectation inside a property as the cause, which only the suite's text has
+const PROPERTY_EXPECTS = /Property failed after (?:(?!●)[^])*Cause:\s+expect\(/;
 
-/** Whether one failure message comes from an expectation, alone or inside a property. */
-export function isAssertion(message) {
-  const plain = message.replace(ESCAPES, '');
-  return MATCHER.test(plain) || (PROPERTY.test(plain) && PROPERTY_VERDICT.test(plain));
+const plain = (text) => text.replace(ESCAPES, '');
+
+/** Whether a failed test's message comes from an expectation, or a property that does not hold. */
+function isAssertion(message) {
+  return MATCHER.test(plain(message)) || PROPERTY_IS_FALSE.test(plain(message));
 }
 
 /**
  * Reads jest's JSON report.
  *
- * @returns `caught` with the first test that asserts, `passed`, or `crashed` with a first line
+ * @returns `caught` with what asserts, `passed`, or `crashed` with a first line
  */
-export function readVerdict(report) {
-  const tests = report.testResults.flatMap(({ assertionResults }) => assertionResults);
-  const caughtBy = tests.find(({ failureMessages }) => failureMessages.some(isAssertion));
-  if (caughtBy) return { state: 'caught', by: caughtBy.fullName };
-  if (report.success) return { state: 'passed', by: '' };
+export function readVerdict({ success, testResults }) {
+  const tests = testResults.flatMap(({ assertionResults }) => assertionResults);
+  const test = tests.find(({ failureMessages }) => failureMessages.some(isAssertion));
+  if (test) return { state: 'caught', by: test.fullName };
+  const suite = testResults.find(({ message }) => PROPERTY_EXPECTS.test(plain(message)));
+  if (suite) return { state: 'caught', by: `a property: ${firstFailure(suite)}` };
+  if (success) return { state: 'passed', by: '' };
   const messages = [
     ...tests.flatMap(({ failureMessages }) => failureMessages),
-    ...report.testResults.map(({ message }) => message),
+    ...testResults.map(({ message }) => message),
   ];
   const [first = 'no tests ran'] = messages.filter(Boolean);
-  return { state: 'crashed', by: first.replace(ESCAPES, '').trim().split('\n')[0] };
+  return { state: 'crashed', by: plain(first).trim().split('\n')[0] };
+}
+
+function firstFailure({ assertionResults }) {
+  const failed = assertionResults.find(({ status }) => status === 'failed');
+  return failed?.fullName ?? 'the whole suite';
 }

@@ -15,7 +15,7 @@ export const GEOMETRY = group(
     ['finished-reach', '.sub(wideTurning)', '.add(wideTurning)'],
     ['folded-raw-width', '(1 + Math.tan', '(1 - Math.tan'],
     ['half-angle', 'Math.PI / wedgeCount', '(2 * Math.PI) / wedgeCount'],
-    ['half-angle', 'wedgeCount < 3', 'wedgeCount <= 3'],
+    ['half-angle', 'wedgeCount < 3', 'wedgeCount < 2'],
     ['hole-corner', ') / Math.cos', ') * Math.cos'],
     ['margin-on-folds', 'reachIn * Math.cos', 'reachIn * Math.sin'],
     [
