@@ -4,12 +4,11 @@ import { migrate } from './migrate';
 import { mintSession } from './mint-session';
 import { performCommand, type WriteCommand } from './perform-command';
 import type { ProjectChange } from './project-change';
-import { readAnswers } from './read/read-answers';
+import { keepAnswer, readAnswer } from './read/read-answer';
 import { readDurability } from './read/read-durability';
 import { loadState, viewsOf } from './read/load-state';
 import { saveCopy } from './read/save-copy';
 import type { SqlDatabase } from './sql-database';
-import { sql } from './sql-text';
 import type { StoreTools } from './store-tools';
 import { beginWork, type StoreState, type Work } from './work';
 import { createQueue, writeAll } from './write-queue';
@@ -39,7 +38,6 @@ interface Opened {
   db: SqlDatabase;
   tools: StoreTools;
   state: StoreState;
-  answers: Map<string, Answer>;
   /** a commit failed: the memory is to be read again before the next write */
   stale: boolean;
 }
@@ -51,13 +49,7 @@ interface Opened {
  */
 export async function openStore(db: SqlDatabase, tools: StoreTools): Promise<Store> {
   await migrate(db);
-  const opened: Opened = {
-    db,
-    tools,
-    answers: await readAnswers(db, tools.nowMs()),
-    state: await loadState(db),
-    stale: false,
-  };
+  const opened: Opened = { db, tools, state: await loadState(db), stale: false };
   const inTurn = createQueue();
   return {
     projects: () => viewsOf(opened.state.records.values()),
@@ -74,8 +66,6 @@ async function perform(
   if (command.do === 'durability') return answerWith(await readDurability(opened.db));
   if (command.do === 'saveCopy') return answerWith(await saveCopy(opened.db, opened.tools.nowMs()));
   if (opened.stale) await refresh(opened);
-  const known = request === null ? undefined : opened.answers.get(request);
-  if (known) return { answer: known, changes: [] };
   return write(opened, request, command);
 }
 
@@ -92,27 +82,18 @@ async function write(
   const begun = work.statements.length;
   const answer = await performCommand(db, work, tools, command);
   if (!answer.ok || work.statements.length === begun) return { answer, changes: [] };
-  await commit(opened, work, request, answer);
-  return { answer, changes: work.changes };
-}
-
-async function commit(
-  opened: Opened,
-  work: Work,
-  request: string | null,
-  answer: Answer,
-): Promise<void> {
-  const kept = sql`INSERT INTO request (id, answer, at_ms)
-    VALUES (${request}, ${JSON.stringify(answer)}, ${work.nowMs})`;
+  const kept = request === null ? [] : keepAnswer(request, answer, work.nowMs);
   try {
-    await writeAll(opened.db, request === null ? work.statements : [...work.statements, kept]);
+    await writeAll(db, [...kept, ...work.statements]);
   } catch (error) {
-    if (await hasLanded(opened, work)) return;
+    if (await hasLanded(opened, work)) return { answer, changes: work.changes };
+    const known = request === null || opened.stale ? null : await readAnswer(db, request);
+    if (known) return { answer: known, changes: [] };
     throw error;
   }
-  const { records, session, seqs, lastOrd, lastTallyNo, lastTimeMs } = work;
+  const { records, seqs, lastOrd, lastTallyNo, lastTimeMs } = work;
   opened.state = { records, session, seqs, lastOrd, lastTallyNo, lastTimeMs };
-  if (request !== null) opened.answers.set(request, answer);
+  return { answer, changes: work.changes };
 }
 
 /**
@@ -127,7 +108,6 @@ async function hasLanded(opened: Opened, work: Work): Promise<boolean> {
 }
 
 async function refresh(opened: Opened): Promise<void> {
-  opened.answers = await readAnswers(opened.db, opened.tools.nowMs());
   opened.state = await loadState(opened.db);
   opened.stale = false;
 }

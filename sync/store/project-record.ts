@@ -8,6 +8,8 @@ import type { TallyParts } from '../merge/tally';
 export interface TallyRecord extends TallyParts {
   no: number;
   ruling: Stamped | null;
+  /** the newest act of this device on it that stands */
+  newest: OwnAct | null;
 }
 
 /** An act of this device that undo can take back. */
@@ -27,8 +29,15 @@ export interface ProjectRecord {
   fieldBase: Readonly<Record<FieldName, Stamped>>;
   /** by `nameTally` */
   tallies: ReadonlyMap<string, TallyRecord>;
-  /** the newest act that stands, by step */
-  newest: ReadonlyMap<string, OwnAct>;
+}
+
+/** This device's newest act of a step that stands. */
+export function newestOf(tallies: ProjectRecord['tallies'], step: string): OwnAct | null {
+  let best: OwnAct | null = null;
+  for (const { newest } of tallies.values()) {
+    if (newest?.step === step && newest.ord > (best?.ord ?? 0)) best = newest;
+  }
+  return best;
 }
 
 export const toUndoable = ({ step, lane, kind, delta, act, ord }: OwnAct) => ({

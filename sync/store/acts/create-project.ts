@@ -71,6 +71,5 @@ function toRecord(start: ProjectStart, written: WrittenAct, edits: string): Proj
     edits,
     fieldBase: { name: written, note: written },
     tallies: new Map(),
-    newest: new Map(),
   };
 }

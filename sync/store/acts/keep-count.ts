@@ -1,7 +1,7 @@
 import type { TallyKey } from '../../../shared/model/tally';
 import { nameTally, shownTally } from '../../merge/tally';
 import { withCounts, type ProjectChange } from '../project-change';
-import { toUndoable, type OwnAct, type ProjectRecord, type TallyRecord } from '../project-record';
+import { newestOf, toUndoable, type ProjectRecord, type TallyRecord } from '../project-record';
 import { sql } from '../sql-text';
 import type { Work, WrittenAct } from '../work';
 
@@ -14,7 +14,7 @@ export function openTally(work: Work, record: ProjectRecord, key: TallyKey): Tal
     sql`INSERT INTO tally_key (no, scope_id, step, lane, kind)
       VALUES (${work.lastTallyNo}, ${record.view.id}, ${key.step}, ${key.lane}, ${key.kind})`,
   );
-  return { no: work.lastTallyNo, tapPart: 0, offset: 0, ruling: null };
+  return { no: work.lastTallyNo, tapPart: 0, offset: 0, ruling: null, newest: null };
 }
 
 /** Writes a changed count and when it was worked at, which tells the project's last place of work. */
@@ -24,41 +24,31 @@ export function keepCount(
   key: TallyKey,
   written: WrittenAct,
   tally: TallyRecord,
-  newest: OwnAct | null,
 ): void {
   const { id } = record.view;
-  const { no, tapPart, offset, ruling } = tally;
+  const { no, tapPart, offset, ruling, newest } = tally;
   work.statements.push(
     sql`INSERT OR REPLACE INTO view_tally
-      (tally_no, tap_part, "offset", worked_ms, set_session, set_seq, set_stamp_ms)
-      VALUES (${no}, ${tapPart}, ${offset}, ${written.stampMs}, ${ruling?.session ?? null}, ${ruling?.seq ?? null},
-        ${ruling?.stampMs ?? null})`,
+      (tally_no, tap_part, "offset", worked_ms, set_session, set_seq, set_stamp_ms,
+        newest_ord)
+      VALUES (${no}, ${tapPart}, ${offset}, ${written.stampMs}, ${ruling?.session ?? null},
+        ${ruling?.seq ?? null}, ${ruling?.stampMs ?? null}, ${newest?.ord ?? null})`,
   );
   const { step, lane, kind } = key;
+  const tallies = new Map(record.tallies).set(nameTally(key), tally);
+  const act = newestOf(tallies, step);
   const change: ProjectChange = {
     kind: 'counts',
     id,
     tallies: [{ step, lane, kind, shown: shownTally(tally) }],
-    undoable: [{ step, act: newest && toUndoable(newest) }],
+    undoable: [{ step, act: act && toUndoable(act) }],
     workedAtMs: written.stampMs,
     lastStepKey: step,
   };
   work.records.set(id, {
     ...record,
     view: withCounts(record.view, change),
-    tallies: new Map(record.tallies).set(nameTally(key), tally),
-    newest: withNewest(record.newest, step, newest),
+    tallies,
   });
   if (!record.deleted) work.changes.push(change);
-}
-
-function withNewest(
-  newest: ProjectRecord['newest'],
-  step: string,
-  act: OwnAct | null,
-): ProjectRecord['newest'] {
-  const next = new Map(newest);
-  if (act) next.set(step, act);
-  else next.delete(step);
-  return next;
 }

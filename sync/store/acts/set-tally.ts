@@ -31,5 +31,5 @@ export function setTally(work: Work, record: ProjectRecord, key: TallyKey, want:
   );
   const ruling = { session, seq, stampMs };
   const newest = { ord, session, seq, step, lane, kind, act: 'set', delta: moved } as const;
-  keepCount(work, record, key, written, { ...tally, offset, ruling }, newest);
+  keepCount(work, record, key, written, { ...tally, offset, ruling, newest });
 }

@@ -24,7 +24,6 @@ export function tapTally(work: Work, record: ProjectRecord, key: TallyKey, wante
     sql`INSERT INTO tap (ord, tally_no, scope_id, session, seq, delta)
       VALUES (${ord}, ${tally.no}, ${id}, ${session}, ${seq}, ${delta})`,
   );
-  const counted = { ...tally, tapPart: tally.tapPart + delta };
   const newest = { ord, session, seq, step, lane, kind, act: 'tap', delta } as const;
-  keepCount(work, record, key, written, counted, newest);
+  keepCount(work, record, key, written, { ...tally, tapPart: tally.tapPart + delta, newest });
 }

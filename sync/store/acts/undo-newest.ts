@@ -1,6 +1,6 @@
 import { findRuling, type BasedWrite } from '../../merge/ruling';
 import { nameIdentity } from '../../merge/identity';
-import type { OwnAct, ProjectRecord, TallyRecord } from '../project-record';
+import { newestOf, type OwnAct, type ProjectRecord, type TallyRecord } from '../project-record';
 import { findNewestAct } from '../read/find-newest-act';
 import { readSets } from '../read/read-sets';
 import type { SqlDatabase } from '../sql-database';
@@ -16,7 +16,7 @@ export async function undoNewest(
   steps: readonly string[],
 ): Promise<void> {
   const target = steps
-    .flatMap((step) => record.newest.get(step) ?? [])
+    .flatMap((step) => newestOf(record.tallies, step) ?? [])
     .reduce<OwnAct | null>((best, act) => (best && best.ord > act.ord ? best : act), null);
   if (!target) return;
   const { id } = record.view;
@@ -32,8 +32,9 @@ export async function undoNewest(
       (scope_id, target_session, target_seq, session, seq, tally_no, delta)
       VALUES (${id}, ${session}, ${seq}, ${written.session}, ${written.seq}, ${before.no}, ${delta})`,
   );
-  const newest = await findNewestAct(db, id, step, target.ord);
-  keepCount(work, record, { step, lane, kind }, written, after, newest);
+  const key = { step, lane, kind };
+  const newest = await findNewestAct(db, before.no, key, target.ord);
+  keepCount(work, record, key, written, { ...after, newest });
 }
 
 async function countWithout(

@@ -4,17 +4,21 @@ import type { SqlDatabase } from '../sql-database';
 import type { StoreState } from '../work';
 import { readProjects } from './read-projects';
 
+const LAST = `
+  SELECT
+    MAX(COALESCE((SELECT MAX(ord) FROM outbox), 0), COALESCE((SELECT MAX(ord) FROM tap), 0),
+      COALESCE((SELECT MAX(ord) FROM tap_set), 0)) AS ord,
+    COALESCE((SELECT MAX(no) FROM tally_key), 0) AS no,
+    COALESCE((SELECT time_ms FROM outbox ORDER BY ord DESC LIMIT 1), 0) AS time_ms`;
+
 /** The memory of a database just opened; its session is minted at the first write. */
 export async function loadState(db: SqlDatabase): Promise<StoreState> {
-  const [last] = await db.all<{ ord: number; no: number; time_ms: number }>(
-    `SELECT
-      MAX(COALESCE((SELECT MAX(ord) FROM outbox), 0), COALESCE((SELECT MAX(ord) FROM tap), 0),
-        COALESCE((SELECT MAX(ord) FROM tap_set), 0)) AS ord,
-      COALESCE((SELECT MAX(no) FROM tally_key), 0) AS no,
-      COALESCE((SELECT time_ms FROM outbox ORDER BY ord DESC LIMIT 1), 0) AS time_ms`,
-  );
+  const [[last], records] = await Promise.all([
+    db.all<{ ord: number; no: number; time_ms: number }>(LAST),
+    readProjects(db),
+  ]);
   return {
-    records: new Map((await readProjects(db)).map((record) => [record.view.id, record])),
+    records: new Map(records.map((record) => [record.view.id, record])),
     session: null,
     seqs: new Map(),
     lastOrd: last?.ord ?? 0,

@@ -34,15 +34,17 @@ export async function readPlanRows(db: SqlDatabase): Promise<Map<string, PlanRow
     return plan;
   };
   const lanes = new Map<string, PlanLane[]>();
-  const sql = 'SELECT scope_id, step, extra, body FROM lane ORDER BY extra, position';
-  for (const row of await db.all<LaneRow>(sql)) {
+  const [laneRows, stepRows] = await Promise.all([
+    db.all<LaneRow>('SELECT scope_id, step, extra, body FROM lane ORDER BY extra, position'),
+    db.all<StepRow>('SELECT scope_id, key, body FROM step ORDER BY position'),
+  ]);
+  for (const row of laneRows) {
     const lane = PlanLaneSchema.parse(JSON.parse(row.body));
     const name = `${row.scope_id}\t${row.step}`;
     if (row.extra === 1) planOf(row.scope_id).extraLanes.push({ ...lane, step: row.step });
     else lanes.set(name, [...(lanes.get(name) ?? []), lane]);
   }
-  const steps = 'SELECT scope_id, key, body FROM step ORDER BY position';
-  for (const row of await db.all<StepRow>(steps)) {
+  for (const row of stepRows) {
     const body = BodySchema.parse(JSON.parse(row.body));
     const own = lanes.get(`${row.scope_id}\t${row.key}`) ?? [];
     planOf(row.scope_id).steps.push({ ...body, lanes: own });

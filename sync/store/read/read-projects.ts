@@ -1,5 +1,5 @@
 import { PlanRequestSchema } from '../../../shared/model/plan-request';
-import { toUndoable, type ProjectRecord } from '../project-record';
+import type { ProjectRecord } from '../project-record';
 import type { SqlDatabase } from '../sql-database';
 import { readFields } from './read-fields';
 import { readPlanRows } from './read-plan-rows';
@@ -15,18 +15,19 @@ interface ProjectRow {
   deleted: number;
 }
 
-/** Every project of this file, those in the bin too. */
+/** Every project of this file, those in the bin too. Asked at once: the worker is a message away. */
 export async function readProjects(db: SqlDatabase): Promise<ProjectRecord[]> {
-  const rows = await db.all<ProjectRow>('SELECT * FROM project');
-  const fields = await readFields(db);
-  const plans = await readPlanRows(db);
-  const counts = await readTallies(db);
+  const [rows, fields, plans, counts] = await Promise.all([
+    db.all<ProjectRow>('SELECT * FROM project'),
+    readFields(db),
+    readPlanRows(db),
+    readTallies(db),
+  ]);
   return rows.flatMap((row) => {
     const field = fields.get(row.scope_id);
     if (!field) return [];
     const { steps, extraLanes } = plans.get(row.scope_id) ?? { steps: [], extraLanes: [] };
     const count = counts.get(row.scope_id);
-    const newest = count?.newest ?? new Map();
     return [
       {
         view: {
@@ -42,13 +43,12 @@ export async function readProjects(db: SqlDatabase): Promise<ProjectRecord[]> {
           steps,
           extraLanes,
           tallies: count?.shown ?? [],
-          undoable: [...newest.values()].map(toUndoable),
+          undoable: count?.undoable ?? [],
         },
         deleted: row.deleted === 1,
         edits: row.edits,
         fieldBase: field.bases,
         tallies: count?.tallies ?? new Map(),
-        newest,
       },
     ];
   });
