@@ -21,6 +21,9 @@ import type { StoreFailure } from '@/sync/client/projects-client';
 
 const BACK = { label: 'Projects', href: '/projects' } as const;
 
+/** Wide enough for two steppers side by side; the result gets the rest. */
+const FORM_PX = 372;
+
 /** What a project is called when its maker names it nothing: "5 plates, 12 in". */
 export function usualName(request: PlanRequest | undefined): string {
   if (!request) return 'Plates';
@@ -74,7 +77,14 @@ export function SetupForm({ start, keep, clear, onStartAfresh }: SetupFormProps)
     </View>
   );
   return (
-    <PlacePage place="projects" title="Plan the plates" chip back={BACK} aside={end}>
+    <PlacePage
+      place="projects"
+      title="Plan the plates"
+      chip
+      back={BACK}
+      aside={end}
+      paneWidth={FORM_PX}
+    >
       <View style={styles.form}>
         <SetupFields setup={setup} usualName={name} settingsBladeMm={settings.bladeMm} />
       </View>

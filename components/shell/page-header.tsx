@@ -20,23 +20,26 @@ interface PageHeaderProps {
   titleRef: Ref<Text>;
 }
 
-/** Title of a page, the way back above it and the chip at its side. */
+/** Title of a page and the way back above it; the chip stands at the right of the first row. */
 export function PageHeader({ title, chip, back, titleRef }: PageHeaderProps) {
   return (
     <View style={styles.header}>
       {back && (
-        <Link href={back.href} asChild>
-          <Pressable role="link" style={styles.back} testID="back">
-            <Icon name="back" size={20} />
-            <Txt style={styles.backWord}>{back.label}</Txt>
-          </Pressable>
-        </Link>
+        <View style={styles.row}>
+          <Link href={back.href} asChild>
+            <Pressable role="link" style={styles.back} testID="back">
+              <Icon name="back" size={20} />
+              <Txt style={styles.backWord}>{back.label}</Txt>
+            </Pressable>
+          </Link>
+          {chip && <SavedChip />}
+        </View>
       )}
       <View style={styles.row}>
         <Txt kind="display" heading={1} tabIndex={-1} ref={titleRef} style={styles.title}>
           {title}
         </Txt>
-        {chip && <SavedChip />}
+        {chip && !back && <SavedChip />}
       </View>
     </View>
   );
@@ -46,7 +49,6 @@ const styles = StyleSheet.create({
   header: { paddingTop: 8, paddingBottom: 10, paddingHorizontal: 8 },
   back: {
     minHeight: size.touchMin,
-    alignSelf: 'flex-start',
     flexDirection: 'row',
     alignItems: 'center',
     gap: 4,

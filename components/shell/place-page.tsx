@@ -26,6 +26,8 @@ interface PlacePageProps {
   children: ReactNode;
   /** a second pane from 900 px of width on; below the rest on a phone */
   aside?: ReactNode;
+  /** width of the first pane beside an aside; half of the page when left out */
+  paneWidth?: number | undefined;
   /** false where the page itself scrolls */
   scroll?: boolean | undefined;
 }
@@ -45,7 +47,7 @@ export function PlacePage(props: PlacePageProps) {
     <>
       <PageHeader title={title} chip={chip} back={back} titleRef={heading} />
       {wide && aside ? (
-        <TwoPanes left={children} right={aside} />
+        <TwoPanes left={children} right={aside} leftWidth={props.paneWidth} />
       ) : (
         <View style={[styles.column, !scroll && styles.still]}>
           {children}

@@ -15,7 +15,11 @@ export function StationScreen() {
   const known = STATIONS.find((each) => each === station);
   if (project.state !== 'ready' || !known) {
     return (
-      <Instead title="Not on this device" text="This device has no such project or station." />
+      <Instead
+        page={known ? STATION_NAMES[known] : 'Station'}
+        title="Not on this device"
+        text="This device has no such project or station."
+      />
     );
   }
   if (!project.progress.steps.some((each) => each.station === known)) {
@@ -35,14 +39,18 @@ export function StationScreen() {
 function NoSteps({ station }: { station: Station }) {
   const name = STATION_NAMES[station];
   return (
-    <Instead title={`Nothing at the ${name}`} text={`This plan has no steps at the ${name}.`} />
+    <Instead
+      page={name}
+      title={`Nothing at the ${name}`}
+      text={`This plan has no steps at the ${name}.`}
+    />
   );
 }
 
 /** While the store opens, when it did not, and when there is nothing to show. */
-function Instead({ title, text }: { title: string; text: string }) {
+function Instead({ page, title, text }: Record<'page' | 'title' | 'text', string>) {
   return (
-    <PlacePage place="projects" title="Station" back={{ label: 'Projects', href: '/projects' }}>
+    <PlacePage place="projects" title={page} back={{ label: 'Projects', href: '/projects' }}>
       <StoreGate>
         <EmptyState
           title={title}
