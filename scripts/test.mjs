@@ -55,6 +55,7 @@ function jest(env) {
   const { ended } = startChild(process.execPath, [program, ...ours, ...args], {
     cwd: ROOT,
     env,
+    detached: true, // with its workers
     stdio: ['ignore', 'ignore', 'inherit'], // --json repeats all of the results on stdout
   });
   return ended;
