@@ -13,6 +13,7 @@ import { Swatch } from '@/components/ui/swatch';
 import { border, radius, space, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
+import { pressedBySpace } from '@/components/ui/web-only';
 
 /** Which fabric the centre circle is cut from: one of the wedges', or a cloth of its own. */
 export function CircleFabricChoice({ setup }: { setup: Setup }) {
@@ -28,14 +29,16 @@ export function CircleFabricChoice({ setup }: { setup: Setup }) {
         Circle fabric
       </Txt>
       <View role="radiogroup" aria-label="Circle fabric" style={styles.row}>
-        {fabrics.map((fabric, at) =>
-          fabric.role === 'background' ? null : (
+        {fabrics.map((fabric, at) => {
+          const choose = () => change((old) => chooseCircleFabric(old, ids[at] ?? null));
+          return fabric.role === 'background' ? null : (
             <Pressable
               key={fabric.letter}
+              {...pressedBySpace(choose)}
               role="radio"
               aria-checked={fabric.letter === chosen}
               aria-label={`${fabric.letter} ${fabric.name}`}
-              onPress={() => change((old) => chooseCircleFabric(old, ids[at] ?? null))}
+              onPress={choose}
               {...(at === 0 && { testID: 'circleFabric' })}
               style={[
                 styles.choice,
@@ -44,8 +47,8 @@ export function CircleFabricChoice({ setup }: { setup: Setup }) {
             >
               <Swatch fabric={fabric} size={44} />
             </Pressable>
-          ),
-        )}
+          );
+        })}
         {draft.circleCloth === null ? (
           <Button
             label="Another cloth"

@@ -5,6 +5,7 @@ import { Swatch } from '@/components/ui/swatch';
 import { border, radius, space, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
+import { pressedBySpace } from '@/components/ui/web-only';
 import type { RequestFabric } from '@/shared/model/plan-request';
 
 interface ClothChoiceProps {
@@ -28,6 +29,7 @@ export function ClothChoice({ fabric, onChoose }: ClothChoiceProps) {
           return (
             <Pressable
               key={cloth.colour}
+              {...pressedBySpace(() => onChoose(cloth, known))}
               role="radio"
               aria-checked={chosen}
               aria-label={cloth.name}

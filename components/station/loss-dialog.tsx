@@ -8,7 +8,7 @@ import { Stepper } from '@/components/ui/stepper';
 import { Swatch } from '@/components/ui/swatch';
 import { useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
-import { pressable, webOnly } from '@/components/ui/web-only';
+import { pressable, pressedBySpace, webOnly } from '@/components/ui/web-only';
 import type { Plan, PlanStep } from '@/shared/model/plan';
 import type { RequestFabric } from '@/shared/model/plan-request';
 
@@ -104,6 +104,7 @@ function ItemChoice({ item, fabrics, chosen, onPress }: ItemChoiceProps) {
     <Pressable
       {...pressable}
       {...webOnly({ tabIndex: 0 })}
+      {...pressedBySpace(onPress)}
       role="radio"
       aria-checked={chosen}
       aria-label={word}

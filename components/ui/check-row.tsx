@@ -4,7 +4,7 @@ import { Icon, type IconName } from '@/components/ui/icon';
 import { border, size, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
-import { webOnly } from '@/components/ui/web-only';
+import { pressedBySpace, webOnly } from '@/components/ui/web-only';
 
 interface CheckRowProps {
   label: string;
@@ -25,6 +25,7 @@ export function CheckRow({ label, icon, checked, next = false, onPress, testID }
       role="checkbox"
       aria-checked={checked}
       {...webOnly({ dataSet: { ring: 'inside' } })}
+      {...pressedBySpace(onPress)}
       {...(testID && { testID })}
       onPress={onPress}
       style={({ pressed }) => [

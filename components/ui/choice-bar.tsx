@@ -4,7 +4,7 @@ import { Pressable, StyleSheet, View } from 'react-native';
 import { border, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
-import { type KeyEvent, webOnly } from '@/components/ui/web-only';
+import { type KeyEvent, pressedBySpace, webOnly } from '@/components/ui/web-only';
 
 export interface Choice<Value extends string> {
   value: Value;
@@ -64,6 +64,7 @@ export function ChoiceBar<Value extends string>(props: ChoiceBarProps<Value>) {
               role="radio"
               aria-checked={on}
               {...webOnly({ tabIndex: tabbable ? 0 : -1 })}
+              {...pressedBySpace(() => onChange(option.value))}
               onPress={() => onChange(option.value)}
               style={[styles.tab, on && { backgroundColor: color.card, borderColor: color.edge }]}
             >

@@ -7,7 +7,7 @@ import { border, radius, size, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
 import { useTextScale } from '@/components/ui/use-text-scale';
-import { pressable } from '@/components/ui/web-only';
+import { pressable, pressedBySpace } from '@/components/ui/web-only';
 import type { Station } from '@/shared/model/codes';
 
 interface StationSwitcherProps {
@@ -56,6 +56,7 @@ function Tab({ station, on, count, onPress }: TabProps) {
   return (
     <Pressable
       {...pressable}
+      {...pressedBySpace(onPress)}
       role="tab"
       aria-selected={on}
       {...deviceName(count > 0 && !on ? `${name}, ${count} ready` : name)}

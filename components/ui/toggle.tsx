@@ -4,7 +4,7 @@ import { Icon } from '@/components/ui/icon';
 import { border, size, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
-import { pressable } from '@/components/ui/web-only';
+import { pressable, pressedBySpace } from '@/components/ui/web-only';
 
 interface ToggleProps {
   label: string;
@@ -20,6 +20,7 @@ export function Toggle({ label, hint, value, onChange, testID }: ToggleProps) {
   return (
     <Pressable
       {...pressable}
+      {...pressedBySpace(() => onChange(!value))}
       {...(testID && { testID })}
       role="switch"
       aria-checked={value}

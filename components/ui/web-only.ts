@@ -22,6 +22,7 @@ interface WebProps {
 
 export interface KeyEvent {
   key: string;
+  repeat?: boolean;
   currentTarget: unknown;
   preventDefault(): void;
   stopPropagation(): void;
@@ -30,6 +31,19 @@ export interface KeyEvent {
 /** Props that react-native-web knows and React Native's types do not; nothing on a device. */
 export function webOnly(props: WebProps): object {
   return Platform.OS === 'web' ? props : {};
+}
+
+/**
+ * Lets Space press a box, a switch, a radio or a tab, as it does in a browser's own:
+ * react-native-web answers Space for buttons only.
+ */
+export function pressedBySpace(onPress: () => void): object {
+  const press = (event: KeyEvent) => {
+    if (event.key !== ' ') return;
+    event.preventDefault(); // the page would scroll
+    if (!event.repeat) onPress();
+  };
+  return webOnly({ onKeyDown: press });
 }
 
 /** Marks what shrinks a little while it is pressed; the movement itself is in public/app.css. */
