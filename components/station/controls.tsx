@@ -75,9 +75,9 @@ function Control(props: ControlProps) {
       {...pressable}
       role="button"
       aria-label={spoken}
-      aria-disabled={locked}
+      disabled={locked}
       testID={testID}
-      onPress={locked ? null : onPress}
+      onPress={onPress}
       style={({ pressed }) => [
         styles.control,
         { flexGrow: grow, backgroundColor: color.card, borderColor: color.edge },

@@ -7,7 +7,7 @@ import { Icon } from '@/components/ui/icon';
 import { font } from '@/components/ui/type';
 import { useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
-import { pressable } from '@/components/ui/web-only';
+import { pressable, webOnly } from '@/components/ui/web-only';
 import type { Station } from '@/shared/model/codes';
 import type { PlanStep } from '@/shared/model/plan';
 import type { LaneProgress } from '@/shared/model/tally';
@@ -60,7 +60,7 @@ function LaneChip({ lane, name, spoken, station, chosen, onPress }: LaneChipProp
       {...pressable}
       role="button"
       aria-label={spoken}
-      aria-selected={chosen}
+      {...webOnly({ 'aria-pressed': chosen })}
       testID={`lane-${lane.lane.key}`}
       onPress={onPress}
       style={styles.hit}

@@ -16,6 +16,8 @@ import { pageEdge, useTheme } from '@/components/ui/theme';
 import { useLayout } from '@/components/ui/use-layout';
 
 const DIAGRAM_SHARE = 0.38;
+/** A little over the other half, so that the zone itself is half as wide as the phone. */
+const COUNTING_SHARE = 1.06;
 const LEAST_DIAGRAM_PX = 96;
 const HEADER_PX = 52;
 const EDGE_PX = 6;
@@ -56,7 +58,7 @@ const styles = StyleSheet.create({
   columns: { flex: 1, flexDirection: 'row', minHeight: 0 },
   mirrored: { flexDirection: 'row-reverse' },
   half: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
-  counting: { paddingRight: EDGE_PX, paddingBottom: EDGE_PX },
+  counting: { flexGrow: COUNTING_SHARE, paddingRight: EDGE_PX, paddingBottom: EDGE_PX },
   reading: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
   controls: { paddingTop: 4, paddingBottom: EDGE_PX },
   edge: { paddingHorizontal: pageEdge.phone },

@@ -82,7 +82,11 @@ function AllSteps(props: StationPartsProps) {
   const { color } = useTheme();
   const { reading, progress, onGo } = props;
   return (
-    <ScrollView style={[styles.list, { borderColor: color.line }]}>
+    <ScrollView
+      role="complementary"
+      aria-label="Steps of the project"
+      style={[styles.list, { borderColor: color.line }]}
+    >
       <View style={styles.listHead}>
         <Txt kind="section" heading={2} style={styles.project}>
           {reading.project.name}

@@ -98,6 +98,7 @@ export function Button(props: ButtonProps) {
 const styles = StyleSheet.create({
   button: {
     minHeight: size.button,
+    maxWidth: '100%',
     borderRadius: radius.button,
     borderWidth: border.control,
     paddingHorizontal: 20,

@@ -49,8 +49,9 @@ export function TallyZone(props: TallyZoneProps) {
   const dye = useTheme().station(station);
   const [box, setBox] = useState({ width: 0, height: 0 });
   const name = locked ? 'Locked. Hold to unlock' : props.label;
-  const fill = full ? dye.tint : dye.fill;
-  const ink = full ? dye.ink : dye.onFill;
+  const quiet = full || locked; // words on a half transparent zone would be too faint to read
+  const fill = quiet ? dye.tint : dye.fill;
+  const ink = quiet ? dye.ink : dye.onFill;
   return (
     <View style={styles.place}>
       <Pressable
@@ -64,12 +65,11 @@ export function TallyZone(props: TallyZoneProps) {
           styles.zone,
           { minHeight: props.minHeight ?? 0, borderColor: dye.ink },
           { backgroundColor: pressed && !locked ? darken(fill) : fill },
-          locked && styles.locked,
         ]}
       >
         <Spoken>{name}</Spoken>
         <MatGrid color={ink} />
-        <TallyTop {...props} full={full} locked={locked} />
+        <TallyTop {...props} full={quiet} locked={locked} />
         <View style={styles.middle} aria-hidden>
           <TallyNumber value={shown} color={ink} width={box.width} height={box.height} />
           <View style={styles.caption}>
@@ -90,7 +90,7 @@ export function TallyZone(props: TallyZoneProps) {
             of={target}
             {...props.ruler}
             station={station}
-            onFill={!full}
+            onFill={!quiet}
             silent
           />
         </View>
@@ -135,7 +135,6 @@ const styles = StyleSheet.create({
     overflow: 'hidden',
     userSelect: 'none',
   },
-  locked: { opacity: 0.6 },
   middle: { flexGrow: 1, justifyContent: 'center', paddingHorizontal: 12, paddingVertical: 6 },
   caption: { flexDirection: 'row', justifyContent: 'center', alignItems: 'center', gap: 8 },
   of: { fontFamily: font.strong, fontSize: 23, lineHeight: 28 },

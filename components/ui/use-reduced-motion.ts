@@ -1,9 +1,15 @@
 import { useEffect, useState } from 'react';
-import { AccessibilityInfo } from 'react-native';
+import { AccessibilityInfo, Platform } from 'react-native';
+
+/** A browser says so at once: a sheet that began to slide and then may not would never be open. */
+function readNow(): boolean {
+  if (Platform.OS !== 'web' || typeof window.matchMedia !== 'function') return false;
+  return window.matchMedia('(prefers-reduced-motion: reduce)').matches;
+}
 
 /** Whether the device asks for no movement. */
 export function useReducedMotion(): boolean {
-  const [reduced, setReduced] = useState(false);
+  const [reduced, setReduced] = useState(readNow);
   useEffect(() => {
     let gone = false;
     AccessibilityInfo.isReduceMotionEnabled().then(

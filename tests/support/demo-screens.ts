@@ -68,7 +68,7 @@ const SETUP: readonly DemoScreen[] = [
     route: 'projects/new',
     reach: async (page) => {
       await seen(page, '/projects/new', 'totals');
-      await press(page, 'fabric:0');
+      await press(page, 'fabric:1');
       await page.getByTestId('fabric-sheet').waitFor();
     },
   },
