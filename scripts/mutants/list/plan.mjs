@@ -1,6 +1,8 @@
 import { group } from '../group.mjs';
 
-const FIRST = ['tests/shared/plan/(refusals|warnings|plan-example|five-plates|example-projects)'];
+const FIRST = [
+  'tests/shared/plan/(edges-of-limits|refusals|warnings|plan-example|five-plates|example-projects)',
+];
 
 export const PLAN = group('plan', FIRST, [
   ['canonical-json', 'PlanSchema.parse(plan)', 'plan'],
