@@ -1,4 +1,4 @@
-import { useRef, useState } from 'react';
+import { useState } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 
 import { Announcement } from '@/components/ui/announcement';
@@ -12,11 +12,9 @@ import { TallyTop } from '@/components/ui/tally-top';
 import { border, radius, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
+import { useZonePress } from '@/components/ui/use-zone-press';
 import { pressable } from '@/components/ui/web-only';
 import type { Station } from '@/shared/model/codes';
-
-const KEYPAD_HOLD_MS = 500;
-const UNLOCK_HOLD_MS = 1000;
 
 export interface TallyZoneProps {
   station: Station;
@@ -56,7 +54,7 @@ export function TallyZone(props: TallyZoneProps) {
     <View style={styles.place}>
       <Pressable
         {...pressable}
-        {...useZonePress(props, locked)}
+        {...useZonePress(props, locked, box)}
         role="button"
         {...deviceName(name)}
         testID={testID}
@@ -98,32 +96,6 @@ export function TallyZone(props: TallyZoneProps) {
       <Announcement text={`${shown} ${caption}`} />
     </View>
   );
-}
-
-/** A screen reader clicks without pressing in first; the count's rules want both. */
-function useZonePress(props: TallyZoneProps, locked: boolean) {
-  const pressedIn = useRef(false);
-  const pressIn = () => {
-    pressedIn.current = true;
-    props.onPressIn?.();
-  };
-  if (locked) {
-    return { onLongPress: () => props.onUnlock?.(), delayLongPress: UNLOCK_HOLD_MS };
-  }
-  return {
-    onPressIn: pressIn,
-    onPressOut: () => props.onPressOut?.(),
-    onPress: () => {
-      if (!pressedIn.current) pressIn();
-      pressedIn.current = false;
-      props.onTap();
-    },
-    onLongPress: () => {
-      pressedIn.current = false;
-      props.onLongPress();
-    },
-    delayLongPress: KEYPAD_HOLD_MS,
-  };
 }
 
 const styles = StyleSheet.create({
