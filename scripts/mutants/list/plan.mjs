@@ -28,7 +28,7 @@ export const PLAN = group('plan', FIRST, [
   ['make-plan', 'sum + countStrips(strips)', 'sum + strips.length'],
   ['make-plan', 'CAUTIOUS_WIDTH = new Fraction(40)', 'CAUTIOUS_WIDTH = new Fraction(41)'],
   ['normalise-request', 'seam: lowest(request.seam)', 'seam: request.seam'],
-  ['parse-request', ".replace(/~/g, '~0')", ''],
+  ['parse-request', "? 'not-a-length' : 'not-a-request'", "? 'not-a-request' : 'not-a-length'"],
   [
     'refuse',
     'return { pointer, code, params }',

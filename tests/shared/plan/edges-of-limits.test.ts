@@ -1,6 +1,7 @@
 import type { PlanRequest } from '../../../shared/model/plan-request';
 import { planJson } from '../../../shared/plan/canonical-json';
 import { defaultRequest, type RingChoices } from '../../../shared/plan/default-request';
+import { parseRequest } from '../../../shared/plan/parse-request';
 import { toFraction, toText } from '../../../shared/units/fraction';
 import { choices, fabricsAToZ, planOf, refusalsOf } from '../support/plans';
 
@@ -93,5 +94,28 @@ describe('the one text of a plan', () => {
     Object.assign(shuffled, { geometry: turned(plan.geometry), totals: turned(plan.totals) });
     expect(JSON.stringify(shuffled)).not.toBe(planJson(plan));
     expect(planJson(shuffled)).toBe(planJson(plan));
+  });
+
+  /** Every length of a request over a denominator twice as large. */
+  function doubled(value: unknown): unknown {
+    if (Array.isArray(value)) return value.map(doubled);
+    if (typeof value === 'string' && /^\d+(\/\d+)?$/.test(value)) {
+      const [numerator, denominator = '1'] = value.split('/');
+      return `${2 * Number(numerator)}/${2 * Number(denominator)}`;
+    }
+    if (typeof value !== 'object' || value === null) return value;
+    return Object.fromEntries(Object.entries(value).map(([key, inner]) => [key, doubled(inner)]));
+  }
+
+  it.each([
+    ['a pointed tip and a circle', { tip: 'pointed', centre: 'circle' }],
+    ['a rounded tip and an open centre', { tip: 'rounded', centre: 'none' }],
+  ] as const)('is the same for lengths not in lowest terms, with %s', (_says, shapes) => {
+    const request = ask({ ...shapes, shrinkPercent: '3', stripHeight: '31/8', narrowAt: '3/2' });
+    const fabrics = request.fabrics.map((fabric) => ({ ...fabric, buyYards: '3/2' }));
+    const asked = { ...request, fabrics };
+    const parsed = parseRequest(doubled(asked));
+    expect(parsed).toEqual({ ok: true, value: asked });
+    if (parsed.ok) expect(planJson(planOf(parsed.value))).toBe(planJson(planOf(asked)));
   });
 });
