@@ -123,6 +123,16 @@ describe('a count that outruns its inputs', () => {
     expect(progress.at('pair').lanes[0]?.possible).toBe(0);
   });
 
+  it('counts pieces that were lost before as not there', () => {
+    const progress = read(
+      tally('tip-turn', 'A', 4),
+      tally('tip-turn', 'B', 4),
+      tally('tip-turn', 'tip:A', 1, 'lost'),
+      tally('pair', 'A+B', 4),
+    );
+    expect(progress.at('pair')).toMatchObject({ made: 4, outrun: 1 });
+  });
+
   it('is laid to the later step when two use the same item', () => {
     const mixed = planOf(defaultRequest(choices({ fabrics: fabricsAToZ(4) })));
     // five to a quarter from four fabrics: A is in pairs and, elsewhere, the single in the middle
