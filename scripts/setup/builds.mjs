@@ -86,8 +86,11 @@ async function cached(kind, inputs, build) {
 
 const usersOf = (folder) => `${folder}.used-by`;
 
-/** Keeps the newest few builds, and those that a living process uses. */
+/** Keeps the newest few builds, and those that a living process uses; nothing half made. */
 function clearAway(home) {
+  for (const name of readdirSync(home).filter((it) => it.endsWith('.partial'))) {
+    rmSync(path.join(home, name), { recursive: true, force: true });
+  }
   const builds = readdirSync(home)
     .filter((name) => /^[0-9a-f]+$/.test(name))
     .map((name) => path.join(home, name))
