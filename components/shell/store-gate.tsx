@@ -48,7 +48,7 @@ function StorageNote({ status }: { status: StoreStatus }) {
         <Note
           tone="caution"
           title="This browser gives no lasting storage."
-          text="Keep this tab open, and save a copy before you close it."
+          text="Keep this tab open, and save a copy before you close it: a reload may lose the last second."
           action={copy}
         />
       </View>

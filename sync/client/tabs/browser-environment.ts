@@ -12,7 +12,7 @@ export function browserEnvironment(
   engine: Pick<StoreTools, 'makePlan' | 'exampleProjects'>,
 ): TabEnvironment {
   return {
-    build: readBuild(),
+    build: process.env.EXPO_PUBLIC_BUILD ?? 'unnamed',
     tools: {
       nowMs: Date.now,
       random16: async () => crypto.getRandomValues(new Uint8Array(16)),
@@ -46,10 +46,4 @@ function openChannel(onMessage: (message: TabMessage) => void) {
 async function isFull(): Promise<boolean> {
   const { quota, usage } = (await navigator.storage?.estimate?.()) ?? {};
   return quota !== undefined && usage !== undefined && quota - usage < ROOM_BYTES;
-}
-
-/** The name of the bundle holds a hash of the whole build. */
-function readBuild(): string {
-  const source = document.querySelector<HTMLScriptElement>('script[src*="entry-"]')?.src ?? '';
-  return /entry-([0-9a-f]+)\.js/.exec(source)?.[1] ?? 'development';
 }

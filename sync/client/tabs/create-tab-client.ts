@@ -73,10 +73,7 @@ class Tab {
     if (this.queued) return;
     this.queued = true;
     const hold = () => this.lead();
-    this.env.holdLock(hold).then(
-      () => (this.queued = false),
-      () => (this.queued = false),
-    );
+    this.env.holdLock(hold).catch(() => (this.queued = false));
   }
 
   /** Leads until this tab goes; gives the lock back at once if the database does not open. */
@@ -84,7 +81,9 @@ class Tab {
     try {
       this.leader = await openLeader(this.env, this.box, this.channel);
     } catch (error) {
-      this.fail(await failureOf(error, this.env.isFull));
+      const failure = await failureOf(error, this.env.isFull);
+      this.queued = false; // the lock is free again: `start` queues anew
+      this.fail(failure);
       return;
     }
     this.leader.welcome(true);

@@ -13,6 +13,8 @@ export interface FakeBrowser {
   sent: TabMessage[];
   /** Makes the next transactions fail as a full disk does. */
   fill(full: boolean): void;
+  /** Makes the next opening of the database fail. */
+  failOpening(): void;
   /** Time goes only when a test lets it, so that a slow machine changes nothing. */
   pass(ms: number): void;
 }
@@ -36,6 +38,7 @@ export function openFakeBrowser(file: string): FakeBrowser {
   const sent: TabMessage[] = [];
   let holder: object | null = null;
   let full = false;
+  let failing = false;
   let serial = 0;
   let nowMs = 1_000_000;
   const timers = new Set<{ dueMs: number; job: () => void }>();
@@ -70,6 +73,10 @@ export function openFakeBrowser(file: string): FakeBrowser {
     let db: SqlDatabase | null = null;
     let frozen: TabMessage[] | null = null;
     const openDatabase = async () => {
+      if (failing) {
+        failing = false;
+        throw new Error('unable to open database file');
+      }
       const opened = openNodeDatabase(file);
       db = opened;
       const exec = async (sql: string) => {
@@ -131,5 +138,11 @@ export function openFakeBrowser(file: string): FakeBrowser {
       },
     };
   };
-  return { openTab, sent, pass, fill: (on) => (full = on) };
+  return {
+    openTab,
+    sent,
+    pass,
+    fill: (on) => (full = on),
+    failOpening: () => (failing = true),
+  };
 }

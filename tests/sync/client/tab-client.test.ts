@@ -161,6 +161,41 @@ it('never opens a database that a newer build wrote', async () => {
   expect(await client.openExample()).toEqual({ ok: false, kind: 'newer-schema' });
 });
 
+it('starts when asked again after an opening that failed, with no tab closed', async () => {
+  browser.failOpening();
+  const { client } = await open();
+  expect(client.snapshot().status).toMatchObject({
+    phase: 'failed',
+    failure: { kind: 'failed', detail: 'unable to open database file' },
+  });
+  await client.start();
+  expect(client.snapshot().status).toMatchObject({ phase: 'ready', role: 'leader', failure: null });
+});
+
+it('gives the lock to the next tab when its own opening fails', async () => {
+  browser.failOpening();
+  const [failed, other] = [await open(), await open()];
+  expect(other.client.snapshot().status).toMatchObject({ phase: 'ready', role: 'leader' });
+  await failed.client.start();
+  expect(failed.client.snapshot().status).toMatchObject({ phase: 'ready', role: 'follower' });
+});
+
+it.each([
+  ['a newer one', SCHEMA_VERSION + 1, 'newer-schema'],
+  ['an older one', SCHEMA_VERSION - 1, 'open-elsewhere'],
+] as const)('shows nothing of a leader whose schema is %s', async (_which, schema, kind) => {
+  const one = await open();
+  const two = await open();
+  const id = await newProject(two.client);
+  const other = { build: 'other', schema, storage: 'private', persisted: null } as const;
+  one.tab.env
+    .openChannel(() => undefined)
+    .send({ kind: 'welcome', begins: false, revision: 9, projects: [], ...other });
+  await until(() => two.client.snapshot().status.phase === 'failed');
+  expect(two.client.snapshot().status.failure).toEqual({ kind });
+  expect(await two.client.tap(id, cutKey, 1)).toEqual({ ok: false, kind });
+});
+
 it('tells that the storage is full, keeps what was there, and goes on when there is room', async () => {
   const { client } = await open();
   const id = await newProject(client);
