@@ -1,6 +1,6 @@
 import { group } from '../group.mjs';
 
-const FIRST = ['tests/shared/steps', 'tests/shared/plan/(plan-example|five-plates)'];
+const FIRST = ['tests/shared/steps', 'tests/shared/(outside|plan/plan-example)'];
 
 export const STEPS = group('steps', FIRST, [
   ['count-outrun', 'addAmount(pool, item, -parts)', 'addAmount(pool, item, parts)'],

@@ -87,8 +87,12 @@ export const plateChecks: Checks = {
   'plate14.area': () =>
     expect(ringArea('pointed', 2, reachIn(), 20)).toBeCloseTo(102.865027, MILLIONTH),
 
-  'plate14.background': () =>
-    expect(plate().geometry.background).toEqual({ cut: '31/2', trim: '29/2' }),
+  // trimmed from the centre, half of it each way
+  'plate14.background': () => {
+    expect(plate().geometry.background).toEqual({ cut: '31/2', trim: '29/2' });
+    const trimmed = plate().steps.find(({ role }) => role === 'block-trim');
+    expect(trimmed?.title.params).toEqual({ trim: '29/2', fromCentre: '29/4' });
+  },
 
   'plate14.drift': () => expect(seamDrift(1 / 32, 20)).toBeCloseTo(0.199764, MILLIONTH),
 };
