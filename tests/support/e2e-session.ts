@@ -7,7 +7,7 @@ import type { BrowserContext, Page } from 'playwright-core';
 import { killBrowser, openBrowser, PHONE } from './chromium';
 import { startServer, stopServer } from './server-process';
 
-export interface Session {
+interface Session {
   profile: string;
   /** errors on the console, of the page and of the content policy, in all tabs */
   complaints: string[];

@@ -3,7 +3,7 @@ import type { Page } from 'playwright-core';
 import { press, retype, titleOf, until } from './e2e-page';
 
 /** Stars a wedge fabric: rows carry their place in the list. */
-export async function makeDominant(page: Page, row: string): Promise<void> {
+async function makeDominant(page: Page, row: string): Promise<void> {
   await press(page, row);
   await press(page, 'dominant');
   await page.getByTestId('fabric-sheet').getByRole('button', { name: 'Close' }).click();
