@@ -18,7 +18,9 @@ import { tapZone, untilCount } from '../support/e2e-station';
 
 const BUILT = process.env.WEB_DIST ?? 'dist';
 const dist = mkdtempSync(path.join(tmpdir(), 'dist-'));
-cpSync(BUILT, dist, { recursive: true, filter: (file) => !/\.(br|gz)$/.test(file) });
+beforeAll(() => {
+  cpSync(BUILT, dist, { recursive: true, filter: (file) => !/\.(br|gz)$/.test(file) });
+});
 const session = openSession({ env: { WEB_DIST: dist } });
 afterAll(() => rmSync(dist, { recursive: true, force: true }));
 
