@@ -154,6 +154,20 @@ describe('lost pieces', () => {
     expect(progress.onHand('wedge:D')).toBe(2);
   });
 
+  it('that take a part of a strip ask for a whole strip, unless one has enough left', () => {
+    // three lengths to a strip: three plates use it up, one plate leaves two thirds
+    const counts = (of: Plan): Tally[] => [
+      { step: keyOf('strip', of), lane: 'A', kind: 'done', shown: 1 },
+      { step: keyOf('length', of), lane: 'A', kind: 'done', shown: of === plan ? 1 : 3 },
+      { step: keyOf('length', of), lane: 'length:A', kind: 'lost', shown: 1 },
+    ];
+    const sizes = { block: '16', wedges: 16, blocks: 3, fabrics: fabricsAToZ(4) };
+    const three = planOf(defaultRequest(choices(sizes)));
+    const stripsOf = (of: Plan) => readProgress(of.steps, [], counts(of)).steps[0];
+    expect(stripsOf(three)).toMatchObject({ role: 'strip', target: 5, toGo: 4 });
+    expect(stripsOf(plan)).toMatchObject({ role: 'strip', target: 4, toGo: 3 });
+  });
+
   it('farther on ask for all that they were made of', () => {
     const counts = allDone().filter(
       ({ step }) => step !== keyOf('quarter') && step !== keyOf('half'),

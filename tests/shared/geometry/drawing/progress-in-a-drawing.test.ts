@@ -39,6 +39,13 @@ describe('cutRun', () => {
     expect(run.pieces.length).toBe(1);
   });
 
+  it('lies on a length as cut, half the squaring in from its end', () => {
+    const run = cutRun(ringPlan(), laneOf(ringPlan(), 'cut'), 0);
+    expect([run.lengthIn, run.heightIn]).toEqual([12, 5.5]);
+    const xs = run.pieces.flatMap(({ outline }) => outline.map(([x]) => x));
+    expect(Math.min(...xs)).toBeCloseTo(0.25, 9);
+  });
+
   it('keeps the whole run on the cloth', () => {
     const run = stackRun(ringPlan(), null);
     const xs = run.pieces.flatMap(({ outline }) => outline.map(([x]) => x));
@@ -99,6 +106,11 @@ describe('layOutCuts', () => {
 });
 
 describe('stackRows', () => {
+  it('opens it for one layer too many', () => {
+    const rows = stackRows(7, { x: 0, y: 0, width: 72, height: 120 });
+    expect(Math.min(...rows.map(({ height }) => height))).toBeGreaterThanOrEqual(17);
+  });
+
   it('opens another column rather than make letters too small', () => {
     const rows = stackRows(12, { x: 0, y: 0, width: 72, height: 120 });
     expect(new Set(rows.map(({ x }) => x)).size).toBe(2);
