@@ -22,5 +22,4 @@ export const LengthSchema = z.union([
   RoundedLengthSchema,
 ]);
 export type TemplateLength = z.output<typeof TemplateLengthSchema>;
-export type RoundedLength = z.output<typeof RoundedLengthSchema>;
 export type Length = z.output<typeof LengthSchema>;

@@ -4,6 +4,7 @@ import { halfAngle } from '../geometry/half-angle';
 import type { PlanRefusal } from '../model/plan';
 import type { PlanRequest } from '../model/plan-request';
 import type { RingGeometry } from '../patterns/ring/ring-geometry';
+import { downToEighth } from '../units/down-to-eighth';
 import { toFraction, toText } from '../units/fraction';
 import { upToEighth } from '../units/up-to-eighth';
 import { refuse } from './refuse';
@@ -70,8 +71,4 @@ function checkCloth(request: PlanRequest, geometry: RingGeometry): PlanRefusal[]
 function above(exactIn: number): Fraction {
   const up = upToEighth(exactIn);
   return up.valueOf() - exactIn < 1e-9 ? up.add('1/8') : up;
-}
-
-function downToEighth(exact: Fraction): Fraction {
-  return exact.mul(8).floor().div(8);
 }

@@ -1,8 +1,10 @@
-import { type Fraction } from 'fraction.js';
+import { Fraction } from 'fraction.js';
 
+import { halfAngle } from '../geometry/half-angle';
 import type { FractionText } from '../model/length';
 import type { PlanRequest, RequestFabric } from '../model/plan-request';
 import { defaultCap, type BladeMm } from '../stacks/default-cap';
+import { downToEighth } from '../units/down-to-eighth';
 import { toFraction, toText } from '../units/fraction';
 
 /** What a maker chooses; all that is left out gets its default. Lengths in inches. */
@@ -62,7 +64,7 @@ export function defaultRequest(choices: RingChoices): PlanRequest {
         ? { shape: 'pointed', seam: tipTurning }
         : { shape: choices.tip, turnUnder: tipTurning },
     narrowAt,
-    stripHeight: choices.stripHeight ?? toText(defaultStripHeight(block, tipTurning, narrowAt)),
+    stripHeight: choices.stripHeight ?? toText(defaultStripHeight(choices, tipTurning, narrowAt)),
     centre: defaultCentre(choices),
     background: {
       fabric: fabrics.find(({ role }) => role === 'background')?.letter ?? '',
@@ -90,13 +92,22 @@ function defaultNarrowAt(block: FractionText): Fraction {
   return eighthOfBlock.lt(NARROW_LEAST) ? toFraction(NARROW_LEAST) : eighthOfBlock;
 }
 
-/** H = B/2 − margin + e_w − r0, so that the ring reaches to the margin. */
+/**
+ * H = B/2 − margin + e_w − r0, so that the ring reaches to the margin. The corners of a few flat
+ * wedges would then stand over the block's side: those get the tallest strip that stays inside.
+ */
 function defaultStripHeight(
-  block: FractionText,
+  { block, tip, wedges }: RingChoices,
   tipTurning: FractionText,
   narrowAt: FractionText,
 ): Fraction {
-  return toFraction(block).div(2).sub(MARGIN).add(tipTurning).sub(narrowAt);
+  const halfBlock = toFraction(block).div(2);
+  const raise = toFraction(tipTurning).sub(narrowAt);
+  const usual = halfBlock.sub(MARGIN).add(raise);
+  if (tip !== 'flat' || wedges < 3) return usual;
+  const farthest = new Fraction(halfBlock.valueOf() * Math.cos(halfAngle(wedges)));
+  const tallest = downToEighth(farthest.add(raise));
+  return tallest.lt(usual) ? tallest : usual;
 }
 
 function defaultCentre(choices: RingChoices): PlanRequest['centre'] {

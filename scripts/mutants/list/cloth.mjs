@@ -46,6 +46,7 @@ const UNITS = group(
     ['parse-length', 'negative || value.equals(0)', 'value.equals(0)'],
     ['up-to-eighth-yard', "= '9/2'", "= '9/4'"],
     ['up-to-eighth-yard', '.ceil()', '.round()'],
+    ['down-to-eighth', 'exact.mul(8).floor()', 'exact.mul(8).ceil()'],
     ['up-to-eighth', 'exact.mul(partsPerInch).ceil()', 'exact.mul(partsPerInch).floor()'],
     ['up-to-eighth', 'upToPart(exactIn, 8)', 'upToPart(exactIn, 4)'],
   ],

@@ -2,6 +2,7 @@ import * as fc from 'fast-check';
 import { Fraction } from 'fraction.js';
 
 import { toFraction, toText } from '../../../shared/units/fraction';
+import { downToEighth } from '../../../shared/units/down-to-eighth';
 import { keepNineDecimals } from '../../../shared/units/keep-nine-decimals';
 import { nearestSixteenth } from '../../../shared/units/nearest-sixteenth';
 import { upToEighth, upToHalf } from '../../../shared/units/up-to-eighth';
@@ -23,6 +24,11 @@ describe('rounding by a named policy', () => {
         return over.gte(0) && over.lt('1/8');
       }),
     );
+  });
+
+  it('finds the most eighths that still fit', () => {
+    expect(toText(downToEighth(new Fraction(4.722)))).toBe('37/8');
+    expect(toText(downToEighth(new Fraction('37/8')))).toBe('37/8');
   });
 
   it('takes a square up to the next half inch', () => {
