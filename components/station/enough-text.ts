@@ -18,13 +18,12 @@ export function enoughText(step: StepProgress, lane: LaneProgress | null): strin
   if (step.toGo === 0) return null;
   const open = step.lanes.filter((each) => !isFull(each) && each.possible !== null);
   if (open.length === 0) return null;
-  if (open.every((each) => allowed(each) === 0)) return waitingText(step);
-  if (step.lanes.length === 1 || open.length === 1) {
-    const only = open[0];
-    return only ? onHandText(only, step.lanes.length > 1) : null;
-  }
-  if (open.length > NAMED_LANES) return lane && !isFull(lane) ? onHandText(lane, true) : null;
-  const parts = open.map((each, index) => {
+  const able = open.filter((each) => allowed(each) > 0);
+  const [only] = able;
+  if (!only) return waitingText(step);
+  if (able.length === 1) return onHandText(only, step.lanes.length > 1);
+  if (able.length > NAMED_LANES) return lane && !isFull(lane) ? onHandText(lane, true) : null;
+  const parts = able.map((each, index) => {
     const count = allowed(each);
     return index === 0
       ? `${count} ${unitWord(step.role, count)} ${laneLetters(each)}`
