@@ -5,6 +5,7 @@ import type { Setup } from '@/components/plan/use-setup';
 import { Chip } from '@/components/ui/chip';
 import { FieldError } from '@/components/ui/field-error';
 import { Icon } from '@/components/ui/icon';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { Swatch } from '@/components/ui/swatch';
 import { size, space, useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
@@ -33,12 +34,13 @@ export function FabricRow({ setup, id, fabric, error, onOpen, testID }: FabricRo
         <Pressable
           {...pressable}
           role="button"
-          aria-label={`Change fabric ${letter}, ${name}`}
+          {...deviceName(`Change fabric ${letter}, ${name}`)}
           onPress={onOpen}
           testID={testID}
           style={({ pressed }) => [styles.open, pressed && { backgroundColor: color.sunk }]}
         >
-          <Swatch fabric={fabric} size={44} dominant={dominant} />
+          <Spoken>{`Change fabric ${letter}, `}</Spoken>
+          <Swatch fabric={fabric} size={44} dominant={dominant} label="" />
           <Txt style={styles.name} numberOfLines={2}>
             {name}
           </Txt>

@@ -1,6 +1,7 @@
 import { Pressable, StyleSheet, View } from 'react-native';
 
 import { Icon, type IconName } from '@/components/ui/icon';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
@@ -74,7 +75,7 @@ function Control(props: ControlProps) {
     <Pressable
       {...pressable}
       role="button"
-      aria-label={spoken}
+      {...(badge > 0 ? deviceName(spoken) : { 'aria-label': spoken })}
       disabled={locked}
       testID={testID}
       onPress={onPress}
@@ -92,6 +93,7 @@ function Control(props: ControlProps) {
       {badge > 0 ? (
         <View style={[styles.badge, { backgroundColor: color.sunk }]}>
           <Txt kind="label">{String(badge)}</Txt>
+          <Spoken> so far</Spoken>
         </View>
       ) : null}
     </Pressable>

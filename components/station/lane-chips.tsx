@@ -5,6 +5,7 @@ import { laneName, unitWord } from '@/components/steps/messages';
 import { itemLetters } from '@/components/steps/item-words';
 import { Icon } from '@/components/ui/icon';
 import { font } from '@/components/ui/type';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { pressable, webOnly } from '@/components/ui/web-only';
@@ -29,7 +30,7 @@ export function LaneChips({ step, lanes, laneKey, onChoose }: LaneChipsProps) {
           key={lane.lane.key}
           lane={lane}
           name={shortName(step, lane)}
-          spoken={spokenName(step, lane)}
+          words={spokenWords(step, lane)}
           station={step.station}
           chosen={lane.lane.key === laneKey}
           onPress={() => onChoose(lane.lane.key)}
@@ -42,13 +43,13 @@ export function LaneChips({ step, lanes, laneKey, onChoose }: LaneChipsProps) {
 interface LaneChipProps {
   lane: LaneProgress;
   name: string;
-  spoken: string;
+  words: SpokenWords;
   station: Station;
   chosen: boolean;
   onPress: () => void;
 }
 
-function LaneChip({ lane, name, spoken, station, chosen, onPress }: LaneChipProps) {
+function LaneChip({ lane, name, words, station, chosen, onPress }: LaneChipProps) {
   const theme = useTheme();
   const dye = theme.station(station);
   const paint = chosen
@@ -59,7 +60,7 @@ function LaneChip({ lane, name, spoken, station, chosen, onPress }: LaneChipProp
     <Pressable
       {...pressable}
       role="button"
-      aria-label={spoken}
+      {...deviceName(`${words.lane}, ${words.done} ${words.target}`)}
       {...webOnly({ 'aria-pressed': chosen })}
       testID={`lane-${lane.lane.key}`}
       onPress={onPress}
@@ -70,12 +71,16 @@ function LaneChip({ lane, name, spoken, station, chosen, onPress }: LaneChipProp
           {name}
         </Txt>
         {isFull(lane) ? (
-          <Icon name="check" size={16} color={ink} />
+          <>
+            <Icon name="check" size={16} color={ink} />
+            <Spoken>{` ${words.done}`}</Spoken>
+          </>
         ) : (
           <Txt kind="small" color={ink}>
-            {String(lane.done * lane.perTap)}
+            {String(words.done)}
           </Txt>
         )}
+        <Spoken>{` ${words.target}, ${words.lane}`}</Spoken>
       </View>
     </Pressable>
   );
@@ -88,10 +93,20 @@ function shortName(step: PlanStep, lane: LaneProgress): string {
   return letters === '' ? laneName(step, lane.lane) : letters;
 }
 
-function spokenName(step: PlanStep, lane: LaneProgress): string {
-  const done = lane.done * lane.perTap;
+interface SpokenWords {
+  lane: string;
+  done: number;
+  /** "of 24 pairs" */
+  target: string;
+}
+
+function spokenWords(step: PlanStep, lane: LaneProgress): SpokenWords {
   const target = lane.lane.target * lane.perTap;
-  return `${laneName(step, lane.lane)}, ${done} of ${target} ${unitWord(step.role, target)}`;
+  return {
+    lane: laneName(step, lane.lane),
+    done: lane.done * lane.perTap,
+    target: `of ${target} ${unitWord(step.role, target)}`,
+  };
 }
 
 const styles = StyleSheet.create({

@@ -5,6 +5,7 @@ import {
   StationToolButtons,
   type StationTools,
 } from '@/components/station/station-tools';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
 import { pressable } from '@/components/ui/web-only';
@@ -48,12 +49,13 @@ function HeaderName(props: { name: string; stepText: string; onPress: (() => voi
     <Pressable
       {...pressable}
       role="button"
-      aria-label={`${name}, ${stepText}. All steps`}
+      {...deviceName(`${name}, ${stepText}. All steps`)}
       testID="steps"
       onPress={onPress}
       style={styles.middle}
     >
       {words}
+      <Spoken>All steps</Spoken>
     </Pressable>
   );
 }

@@ -7,9 +7,13 @@ import { Icon, type IconName } from '@/components/ui/icon';
 import { useTheme } from '@/components/ui/theme';
 import { Txt } from '@/components/ui/txt';
 import { font } from '@/components/ui/type';
+import { useTextScale } from '@/components/ui/use-text-scale';
 import { pressable } from '@/components/ui/web-only';
 import type { PlanStep } from '@/shared/model/plan';
 import type { Progress, StepProgress } from '@/shared/model/tally';
+
+/** From here on a line would be too short to say which step is next. */
+const LARGE_TEXT = 1.3;
 
 interface StepLineProps {
   step: PlanStep;
@@ -58,6 +62,7 @@ function Line(props: { icon: IconName; color: string; text: string; live?: boole
 function NextLine(props: { icon: IconName; text: string; onPress: () => void }) {
   const { icon, text, onPress } = props;
   const { color } = useTheme();
+  const large = useTextScale() > LARGE_TEXT;
   return (
     <Pressable
       {...pressable}
@@ -71,7 +76,7 @@ function NextLine(props: { icon: IconName; text: string; onPress: () => void }) 
       <Txt kind="small" style={styles.strong}>
         Next:
       </Txt>
-      <Txt kind="small" numberOfLines={1} style={styles.text}>
+      <Txt kind="small" numberOfLines={large ? undefined : 1} style={styles.text}>
         {text}
       </Txt>
       <Icon name="chevron" size={20} color={color.ink2} />

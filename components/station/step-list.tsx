@@ -3,6 +3,7 @@ import { Pressable, StyleSheet, View } from 'react-native';
 import { stepTitle, unitWord } from '@/components/steps/messages';
 import { waitingText } from '@/components/station/enough-text';
 import { Icon } from '@/components/ui/icon';
+import { deviceName, Spoken } from '@/components/ui/spoken';
 import { StationBadge } from '@/components/ui/station-badge';
 import { STATION_NAMES } from '@/components/ui/stations';
 import { border, useTheme } from '@/components/ui/theme';
@@ -53,11 +54,12 @@ function StepRow({ step, own, current, onGo }: StepRowProps) {
     <Pressable
       {...webOnly({ 'aria-current': current ? 'step' : undefined, dataSet: { ring: 'inside' } })}
       role="button"
-      aria-label={`${STATION_NAMES[step.station]}: ${stepTitle(step)}. ${text}`}
+      {...deviceName(`${STATION_NAMES[step.station]}: ${stepTitle(step)}. ${text}`)}
       testID={`step-${step.role}`}
       onPress={() => onGo(own)}
       style={[styles.row, { borderBottomColor: theme.color.line }, paint]}
     >
+      <Spoken>{`${STATION_NAMES[step.station]}:`}</Spoken>
       <StationBadge station={step.station} size={32} ready={current} />
       <View style={styles.words}>
         <Txt kind="small" style={current ? styles.strong : styles.title}>

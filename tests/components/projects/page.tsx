@@ -46,11 +46,18 @@ export async function typeInto(testID: string, typed: string): Promise<void> {
 
 export const leaveField = (testID: string) => act(async () => byId(testID).blur());
 
+/** Its words but for those that are hidden from a reader. */
+function readWords(element: HTMLElement): string | null {
+  const copy = element.cloneNode(true) as HTMLElement;
+  for (const hidden of copy.querySelectorAll('[aria-hidden=true]')) hidden.remove();
+  return copy.textContent;
+}
+
 /** The element that is pressed by its words or by its name. */
 export function named(name: string): HTMLElement {
   const all = document.querySelectorAll<HTMLElement>('[role=button],[role=radio],[role=switch],a');
   const found = [...all].find(
-    (one) => one.getAttribute('aria-label') === name || one.textContent === name,
+    (one) => one.getAttribute('aria-label') === name || readWords(one) === name,
   );
   if (!found) throw new Error(`nothing to press is called ${name}`);
   return found;

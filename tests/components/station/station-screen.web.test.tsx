@@ -84,7 +84,7 @@ describe('lanes', () => {
     await settle();
     expect(kept(id, 'pair', 'unpicked')).toBe(2);
     expect(zoneName()).toContain('8 of 40');
-    expect(byId('loss').getAttribute('aria-label')).toBe('Unpick, 2 so far');
+    expect(byId('loss').textContent).toBe('Unpick2 so far');
   });
 });
 
