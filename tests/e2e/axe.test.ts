@@ -41,7 +41,15 @@ describe('with data', () => {
   describe.each(SCREENS)('$name', checkScreen);
 });
 
-function checkScreen({ reach, leave, route }: DemoScreen): void {
+function checkScreen({ reach, leave, route, foldsUp }: DemoScreen): void {
+  const showAt = async (size: typeof PHONE) => {
+    await session.page.setViewportSize(size);
+    if (foldsUp) {
+      await leave?.(session.page);
+      await reach(session.page, demo);
+    }
+    await settle(session.page);
+  };
   beforeAll(async () => {
     await session.page.emulateMedia({ reducedMotion: 'reduce', colorScheme: 'light' });
     await session.page.setViewportSize(PHONE);
@@ -57,8 +65,7 @@ function checkScreen({ reach, leave, route }: DemoScreen): void {
       `breaks no rule of axe-core in ${theme}, %s`,
       async (_, size) => {
         await session.page.emulateMedia({ colorScheme });
-        await session.page.setViewportSize(size);
-        await settle(session.page);
+        await showAt(size);
         const { violations, unsureContrasts } = await runAxe(session.page);
         unsure += unsureContrasts;
         expect(violations).toEqual([]);
@@ -67,15 +74,14 @@ function checkScreen({ reach, leave, route }: DemoScreen): void {
   }
 
   it.each(Object.entries(SIZES))('has nothing too small to hit, %s', async (_, size) => {
-    await session.page.setViewportSize(size);
-    await settle(session.page);
+    await showAt(size);
     expect(await findSmallTargets(session.page)).toEqual([]);
   });
 
   it('holds in a window of 320 px, at any size of text up to 200 %', async () => {
     for (const percent of ['100%', '200%']) {
+      await showAt(NARROW);
       await setTextSize(percent);
-      await session.page.setViewportSize(NARROW);
       await settle(session.page);
       expect({ percent, over: await findOverflow(session.page) }).toEqual({ percent, over: [] });
     }

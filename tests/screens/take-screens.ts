@@ -2,10 +2,10 @@ import { mkdirSync, mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 
-import type { BrowserContext, Page } from 'playwright-core';
+import type { Page } from 'playwright-core';
 
 import { DESK, killBrowser, openBrowser, PHONE } from '../support/chromium';
-import { makeDemo, type Demo } from '../support/demo-projects';
+import { makeDemo, openExample, type Demo } from '../support/demo-projects';
 import { EMPTY_SCREENS, SCREENS, type DemoScreen } from '../support/demo-screens';
 import { settle } from '../support/measure-page';
 import { startServer, stopServer } from '../support/server-process';
@@ -20,43 +20,47 @@ const README_SHOTS = [
   { file: 'table-wide', screen: 'step-cut', size: DESK },
 ];
 const SIZES = { phone: PHONE, wide: DESK };
+const STILL = { reducedMotion: 'reduce', colorScheme: 'light' } as const;
 const THEMES = { day: 'light', lamp: 'dark' } as const;
 
-async function takeAll(browser: BrowserContext): Promise<void> {
-  const [page = await browser.newPage()] = browser.pages();
-  const demo: Demo = { circle: '', hole: '' };
-  if (!README) for (const screen of EMPTY_SCREENS) await takeScreen(page, screen, demo);
-  Object.assign(demo, await makeDemo(page));
-  for (const screen of README ? [] : SCREENS) await takeScreen(page, screen, demo);
-  for (const { file, screen, size } of README ? README_SHOTS : []) {
+async function takeAll(page: Page): Promise<void> {
+  const nothing = { circle: '', hole: '' };
+  for (const screen of EMPTY_SCREENS) await takeScreen(page, screen, nothing);
+  const demo = await makeDemo(page);
+  for (const screen of SCREENS) await takeScreen(page, screen, demo);
+}
+
+/** With the example alone, as a reader of README finds it. */
+async function takeForReadme(page: Page, folder: string): Promise<void> {
+  const demo = { circle: await openExample(page), hole: '' };
+  for (const { file, screen, size } of README_SHOTS) {
     const shown = SCREENS.find(({ name }) => name === screen);
-    await begin(page);
+    await page.emulateMedia(STILL);
+    await page.setViewportSize(size);
     await shown?.reach(page, demo);
-    await take(page, size, path.join(README ?? FOLDER, `${file}.png`));
+    await take(page, path.join(folder, `${file}.png`));
   }
 }
 
-/** Both sizes in both themes, of one visit. */
-async function takeScreen(page: Page, { name, reach, leave }: DemoScreen, demo: Demo) {
-  await begin(page);
-  await reach(page, demo);
-  for (const [theme, colorScheme] of Object.entries(THEMES)) {
-    for (const [kind, size] of Object.entries(SIZES)) {
+/** Both sizes in both themes. */
+async function takeScreen(page: Page, screen: DemoScreen, demo: Demo): Promise<void> {
+  const { name, reach, leave, foldsUp } = screen;
+  for (const [at, [kind, size]] of Object.entries(SIZES).entries()) {
+    await page.emulateMedia(STILL);
+    await page.setViewportSize(size);
+    if (at === 0 || foldsUp) {
+      if (at > 0) await leave?.(page);
+      await reach(page, demo);
+    }
+    for (const [theme, colorScheme] of Object.entries(THEMES)) {
       await page.emulateMedia({ colorScheme });
-      await take(page, size, path.join(FOLDER, `${name}-${kind}-${theme}.png`));
+      await take(page, path.join(FOLDER, `${name}-${kind}-${theme}.png`));
     }
   }
-  await page.setViewportSize(PHONE);
   await leave?.(page);
 }
 
-async function begin(page: Page): Promise<void> {
-  await page.emulateMedia({ reducedMotion: 'reduce', colorScheme: 'light' });
-  await page.setViewportSize(PHONE);
-}
-
-async function take(page: Page, size: typeof PHONE, file: string): Promise<void> {
-  await page.setViewportSize(size);
+async function take(page: Page, file: string): Promise<void> {
   await settle(page);
   await page.screenshot({ path: file });
   console.log(file);
@@ -68,7 +72,8 @@ async function main(): Promise<void> {
   await startServer();
   try {
     const browser = await openBrowser(profile, []);
-    await takeAll(browser);
+    const [page = await browser.newPage()] = browser.pages();
+    await (README ? takeForReadme(page, README) : takeAll(page));
     await browser.close();
   } finally {
     killBrowser(profile);

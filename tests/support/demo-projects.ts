@@ -19,13 +19,19 @@ const FABRICS = [
   { letter: 'C', name: 'Deep Water', role: 'background', colour: '#263C69' },
 ] as const;
 
-/** Opens the example, and keeps a ring with an open hole beside it. */
-export async function makeDemo(page: Page): Promise<Demo> {
+/** Opens the example. @returns the address of its first project */
+export async function openExample(page: Page): Promise<string> {
   await openAt(page, '/projects');
   await press(page, 'open-example');
   const line = page.getByTestId('project-line').filter({ hasText: 'Harbour Lights' });
   const circle = await line.getAttribute('href');
   if (!circle) throw new Error('the example is not there');
+  return circle;
+}
+
+/** Opens the example, and keeps a ring with an open hole beside it. */
+export async function makeDemo(page: Page): Promise<Demo> {
+  const circle = await openExample(page);
   const id = newId(Date.now());
   const request = defaultRequest({
     block: '12',

@@ -13,6 +13,8 @@ export interface DemoScreen {
   reach: (page: Page, demo: Demo) => Promise<void>;
   /** puts back what `reach` changed and another screen would find */
   leave?: (page: Page) => Promise<void>;
+  /** what was opened is closed when the page changes between its narrow and its wide layout */
+  foldsUp?: true;
 }
 
 const VISIT_KEY = 'matside.cuttingVisit';
@@ -20,8 +22,12 @@ const STATION = 'projects/[id]/[station]';
 
 /** Before anything is kept on the device. */
 export const EMPTY_SCREENS: readonly DemoScreen[] = [
-  { name: 'ready-empty', route: 'index', reach: (page) => openAt(page, '/') },
-  { name: 'projects-empty', route: 'projects/index', reach: (page) => openAt(page, '/projects') },
+  { name: 'ready-empty', route: 'index', reach: (page) => seen(page, '/', 'open-example') },
+  {
+    name: 'projects-empty',
+    route: 'projects/index',
+    reach: (page) => seen(page, '/projects', 'open-example'),
+  },
 ];
 
 const PLACES: readonly DemoScreen[] = [
@@ -53,6 +59,7 @@ const SETUP: readonly DemoScreen[] = [
   {
     name: 'setup-warnings',
     route: 'projects/new',
+    foldsUp: true,
     reach: async (page) => {
       await seen(page, '/projects/new', 'totals');
       await retype(page, 'blocks', '5');
@@ -66,6 +73,7 @@ const SETUP: readonly DemoScreen[] = [
   {
     name: 'fabric-sheet',
     route: 'projects/new',
+    foldsUp: true,
     reach: async (page) => {
       await seen(page, '/projects/new', 'totals');
       await press(page, 'fabric:1');
@@ -75,6 +83,7 @@ const SETUP: readonly DemoScreen[] = [
   {
     name: 'start-afresh',
     route: 'projects/new',
+    foldsUp: true,
     reach: async (page) => {
       await seen(page, '/projects/new', 'totals');
       await press(page, 'start-afresh');
@@ -110,7 +119,7 @@ const PROJECT: readonly DemoScreen[] = [
   {
     name: 'plan',
     route: 'projects/[id]/plan',
-    reach: (page, { circle }) => openAt(page, `${circle}/plan`),
+    reach: (page, { circle }) => seen(page, `${circle}/plan`, 'copy-project'),
   },
 ];
 
