@@ -13,6 +13,7 @@ import {
   Switcher,
   Tally,
 } from '@/components/station/station-parts';
+import { BackButton } from '@/components/station/station-tools';
 import { StepList } from '@/components/station/step-list';
 import { WideTools } from '@/components/station/wide-tools';
 import { border, pageEdge, size, useTheme } from '@/components/ui/theme';
@@ -52,7 +53,7 @@ export function WideStation({ desk, ...props }: WideStationProps) {
           <View style={styles.switcher}>
             <Switcher {...props} />
           </View>
-          <WideTools projectId={props.reading.project.id} tools={props.tools} chip={desk} />
+          <WideTools tools={props.tools} chip={desk} />
         </View>
         <View
           style={[
@@ -88,12 +89,15 @@ function AllSteps(props: StationPartsProps) {
       style={[styles.list, { borderColor: color.line }]}
     >
       <View style={styles.listHead}>
-        <Txt kind="section" heading={2} style={styles.project}>
-          {reading.project.name}
-        </Txt>
-        <Txt kind="small" color="ink2">
-          {stepText(props)}
-        </Txt>
+        <BackButton projectId={reading.project.id} />
+        <View style={styles.listWords}>
+          <Txt kind="section" heading={2} style={styles.project}>
+            {reading.project.name}
+          </Txt>
+          <Txt kind="small" color="ink2">
+            {stepText(props)}
+          </Txt>
+        </View>
       </View>
       <StepList
         steps={reading.plan.steps}
@@ -108,7 +112,8 @@ function AllSteps(props: StationPartsProps) {
 const styles = StyleSheet.create({
   page: { flex: 1, flexDirection: 'row' },
   list: { width: STEPS_PX, flexGrow: 0, flexShrink: 0, borderRightWidth: border.hair },
-  listHead: { padding: 20, gap: 4 },
+  listHead: { flexDirection: 'row', paddingVertical: 16, paddingLeft: 6, paddingRight: 16, gap: 4 },
+  listWords: { flex: 1, minWidth: 0, gap: 4, paddingTop: 8 },
   project: { fontSize: 26, lineHeight: 31 },
   work: {
     flex: 1,
