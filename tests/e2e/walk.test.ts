@@ -119,7 +119,7 @@ const ENOUGH_TIPS: [letter: string, good: number, before: string, after: string]
   ['B', 20, 'Enough on hand for 20 more B', 'Enough on hand for 19 more B'],
   ['C', 20, 'Enough for 20 tips C, 19 D and 20 E', 'Enough for 19 tips C, 19 D and 20 E'],
   ['D', 19, 'Enough for 19 tips D and 20 E', 'Enough for 18 tips D and 20 E'],
-  ['E', 20, '20 E', '19 E'],
+  ['E', 20, 'Enough on hand for 20 more E', 'Enough on hand for 19 more E'],
 ];
 
 /** Counts the tips there are, fabric by fabric: the first by a tap, the rest with the keypad. */
