@@ -15,7 +15,9 @@ export async function findSmallTargets(page: Page): Promise<string[]> {
       return document.activeElement === field;
     };
     const small: string[] = [];
-    for (const element of document.querySelectorAll(targets)) {
+    // what lies behind a dialog cannot be pressed
+    const within = document.querySelector('[aria-modal=true]') ?? document;
+    for (const element of within.querySelectorAll(targets)) {
       if (!element.checkVisibility() || element.closest('[inert], [aria-hidden=true]')) continue;
       const { width, height } = element.getBoundingClientRect();
       const least = element.matches('[role=radiogroup] [role=radio]') ? 44 : 48;
