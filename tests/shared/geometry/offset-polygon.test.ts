@@ -1,32 +1,14 @@
-import ClipperLib from 'clipper-lib';
-
 import { halfAngle } from '../../../shared/geometry/half-angle';
 import { offsetPolygon } from '../../../shared/geometry/offset-polygon';
 import type { Point } from '../../../shared/geometry/point';
 import { polygonArea } from '../../../shared/geometry/polygon-area';
 import { wedgeOutline } from '../../../shared/geometry/wedge-outline';
 import { InvariantError } from '../../../shared/result';
-
-const SCALE = 1e7;
-
-/** The outside reference: clipper-lib's mitre offset, its limit raised for the sharpest corner. */
-function clipperOffset(corners: readonly Point[], allowanceIn: number): Point[] {
-  const offset = new ClipperLib.ClipperOffset(20, 1);
-  const path = corners.map(([x, y]) => ({ X: Math.round(x * SCALE), Y: Math.round(y * SCALE) }));
-  offset.AddPath(path, ClipperLib.JoinType.jtMiter, ClipperLib.EndType.etClosedPolygon);
-  const solution = new ClipperLib.Paths();
-  offset.Execute(solution, allowanceIn * SCALE);
-  return (solution[0] ?? []).map(({ X, Y }) => [X / SCALE, Y / SCALE]);
-}
+import { clipperOffset, farthestApart } from '../support/clipper-offset';
 
 function expectSameCorners(ours: readonly Point[], theirs: readonly Point[]): void {
   expect(theirs).toHaveLength(ours.length);
-  for (const [x, y] of ours) {
-    const nearest = Math.min(
-      ...theirs.map(([otherX, otherY]) => Math.hypot(x - otherX, y - otherY)),
-    );
-    expect(nearest).toBeLessThan(1e-4);
-  }
+  expect(farthestApart(ours, theirs)).toBeLessThan(1e-4);
 }
 
 const square: Point[] = [
