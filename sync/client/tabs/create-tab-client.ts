@@ -14,6 +14,8 @@ import type { TabMessage } from './tab-message';
 
 /** How long a tab looks for a leader before it says that another tab is in the way. */
 const START_WITHIN_MS = 6000;
+/** How long a tab that has the lock waits for its own database: files of a dying tab come free. */
+const OPEN_WITHIN_MS = 40_000;
 
 /** The web's client: the same in every tab, whichever leads. */
 export function createTabClient(env: TabEnvironment): ProjectsClient {
@@ -32,6 +34,7 @@ class Tab {
   private leader: Leader | null = null;
   private starting: Promise<void> | null = null;
   private queued = false;
+  private opening = false;
 
   constructor(private readonly env: TabEnvironment) {
     this.channel = env.openChannel((message) => this.receive(message));
@@ -62,7 +65,12 @@ class Tab {
         callOff();
         resolve();
       });
-      const callOff = this.env.after(START_WITHIN_MS, () => this.fail({ kind: 'open-elsewhere' }));
+      const giveUp = () => this.fail({ kind: 'open-elsewhere' });
+      let callOff = this.env.after(START_WITHIN_MS, () => {
+        // no other tab is in the way while this one opens the database itself
+        if (this.opening) callOff = this.env.after(OPEN_WITHIN_MS, giveUp);
+        else giveUp();
+      });
       this.queueForLock();
       this.channel.send({ kind: 'hello', build: this.env.build, schema: SCHEMA_VERSION });
     });
@@ -78,6 +86,7 @@ class Tab {
 
   /** Leads until this tab goes; gives the lock back at once if the database does not open. */
   private async lead(): Promise<void> {
+    this.opening = true;
     try {
       this.leader = await openLeader(this.env, this.box, this.channel);
     } catch (error) {
@@ -85,6 +94,8 @@ class Tab {
       this.queued = false; // the lock is free again: `start` queues anew
       this.fail(failure);
       return;
+    } finally {
+      this.opening = false;
     }
     this.leader.welcome(true);
     const { leader } = this;

@@ -172,6 +172,21 @@ it('starts when asked again after an opening that failed, with no tab closed', a
   expect(client.snapshot().status).toMatchObject({ phase: 'ready', role: 'leader', failure: null });
 });
 
+it('waits for its own slow opening, and blames no other tab for it', async () => {
+  const { env } = browser.openTab();
+  let goOn = (): void => undefined;
+  const slow = new Promise<void>((resolve) => (goOn = resolve));
+  const openDatabase: typeof env.openDatabase = (...given) =>
+    slow.then(() => env.openDatabase(...given));
+  const client = createTabClient({ ...env, openDatabase });
+  const starting = client.start();
+  browser.pass(6000);
+  expect(client.snapshot().status).toMatchObject({ phase: 'starting', failure: null });
+  goOn();
+  await starting;
+  expect(client.snapshot().status).toMatchObject({ phase: 'ready', role: 'leader' });
+});
+
 it('gives the lock to the next tab when its own opening fails', async () => {
   browser.failOpening();
   const [failed, other] = [await open(), await open()];
