@@ -38,8 +38,8 @@ it('has every count after ten quick reloads, and goes on', async () => {
   await openStation(page, station, kept);
   await tapUpTo(page, kept + 1);
   for (let turn = 0; turn < 10; turn += 1) {
+    await page.waitForTimeout(50 + turn * 30); // sooner, the debugger has no page to reload
     await page.reload({ waitUntil: 'commit' });
-    await page.waitForTimeout(turn * 30);
   }
   await untilCount(page, kept + 1);
   await tapUpTo(page, kept + 2);
