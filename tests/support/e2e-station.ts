@@ -78,11 +78,14 @@ export async function tickAllChecks(page: Page): Promise<void> {
   await press(page, 'check-start');
 }
 
-/** Opens a station on a new cutting visit: half an hour went by since the last. */
+/**
+ * Opens a station on a new cutting visit: half an hour went by since the last. A browser that was
+ * killed may not have written the last visit down; then this one is new anyway.
+ */
 export async function comeBackAfterHalfAnHour(page: Page, address: string): Promise<void> {
   await page.evaluate(() => {
     const kept = localStorage.getItem('matside.cuttingVisit');
-    if (kept === null) throw new Error('there was no visit before');
+    if (kept === null) return;
     const visit = JSON.parse(kept) as { lastSeenAtMs: number };
     const before = { ...visit, lastSeenAtMs: visit.lastSeenAtMs - 31 * 60_000 };
     localStorage.setItem('matside.cuttingVisit', JSON.stringify(before));
