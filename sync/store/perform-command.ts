@@ -8,6 +8,7 @@ import { undoNewest } from './acts/undo-newest';
 import { DONE, failed, type Answer, type Command } from './command';
 import type { ProjectRecord } from './project-record';
 import type { SqlDatabase } from './sql-database';
+import { storableText } from './sql-text';
 import type { StoreTools } from './store-tools';
 import type { Work } from './work';
 
@@ -30,7 +31,8 @@ export async function performCommand(
 }
 
 function create(work: Work, tools: StoreTools, command: Command & { do: 'create' }): Answer {
-  const { id, name, note, request } = command;
+  const { id, request } = command;
+  const [name, note] = [storableText(command.name), storableText(command.note)];
   if (work.records.has(id)) return DONE;
   const plan = tools.makePlan(request);
   if (!plan.ok) return failed(plan.errors.map(({ code }) => code).join(' '));
@@ -57,7 +59,7 @@ async function change(
       await undoNewest(db, work, record, command.steps);
       return DONE;
     case 'rename':
-      if (command.name !== record.view.name) writeField(work, record, 'name', command.name);
+      rename(work, record, storableText(command.name));
       return DONE;
     case 'remove':
       if (!record.deleted) deleteProject(work, record);
@@ -69,6 +71,10 @@ async function change(
       if (!hasLane(record, command.lane)) addExtraLane(work, record, command.lane);
       return DONE;
   }
+}
+
+function rename(work: Work, record: ProjectRecord, name: string): void {
+  if (name !== record.view.name) writeField(work, record, 'name', name);
 }
 
 function hasLane({ view }: ProjectRecord, { step, key }: ExtraLane): boolean {

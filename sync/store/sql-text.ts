@@ -25,9 +25,12 @@ export function writeLiteral(value: SqlValue): string {
   return String(value);
 }
 
-// SQL text ends at a NUL, and half a surrogate pair has no UTF-8: neither may cut a statement short.
-const writeText = (text: string) =>
-  `'${text
-    .replaceAll('\u0000', '\uFFFD')
-    .replace(/\p{Surrogate}/gu, '\uFFFD')
-    .replaceAll("'", "''")}'`;
+/**
+ * A text as it can be stored: SQL text ends at a NUL, and half a surrogate pair has no UTF-8; neither
+ * may cut a statement short. What people type goes through this first, so that what is shown now is
+ * what is read later.
+ */
+export const storableText = (text: string) =>
+  text.replaceAll('\u0000', '\uFFFD').replace(/\p{Surrogate}/gu, '\uFFFD');
+
+const writeText = (text: string) => `'${storableText(text).replaceAll("'", "''")}'`;

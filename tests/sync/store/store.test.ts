@@ -139,6 +139,11 @@ describe.each(places)('a store %s', (_place, fileOf) => {
     expect(shown(cutKey)).toBe(1);
   });
 
+  it('shows a name at once as it will be read later, whatever was typed', async () => {
+    await act({ do: 'rename', id: 'p1', name: 'a\u0000b\uD800' });
+    expect(project()?.name).toBe('a\uFFFDb\uFFFD');
+  });
+
   it('opens a lane for recutting, once', async () => {
     const lane = { step: CUT, key: 'D1', target: 1, consumes: {}, makes: { 'wedge:D': 1 } };
     await act({ do: 'addLane', id: 'p1', lane });
