@@ -1,5 +1,5 @@
 import { count } from '@/components/plan/plan-facts';
-import { piecesPerStrip } from '@/shared/cutting/pieces-per-strip';
+import { lastStripLeft } from '@/shared/cutting/last-strip-left';
 import type { Plan, PlanStrip } from '@/shared/model/plan';
 import { formatFraction, formatInches } from '@/shared/units/format-fraction';
 import { toFraction, toText } from '@/shared/units/fraction';
@@ -24,10 +24,7 @@ function writeMakes(strip: PlanStrip, wedgesWanted: number): string {
 
 /** What stays of the last strip, the emptiest, after its pieces: an offcut worth keeping. */
 function writeLeft(strip: PlanStrip, usableWidth: string): string | null {
-  const length = toFraction(strip.length);
-  const usable = toFraction(usableWidth);
-  const before = (strip.count - 1) * piecesPerStrip(usable, length);
-  const left = usable.sub(length.mul(Math.max(0, strip.lengths - before)));
+  const left = lastStripLeft(strip, toFraction(usableWidth));
   if (left.lte(0)) return null;
   return `${formatFraction(toText(left))} × ${formatInches(strip.height)} left`;
 }

@@ -1,11 +1,11 @@
 import { type Fraction } from 'fraction.js';
 
 import type { FractionText } from '../model/length';
-import type { Plan, PlanStrip } from '../model/plan';
+import type { Plan } from '../model/plan';
 import { InvariantError } from '../result';
 import { toFraction, toText } from '../units/fraction';
 import { upToEighth } from '../units/up-to-eighth';
-import { piecesPerStrip } from './pieces-per-strip';
+import { lastStripLeft } from './last-strip-left';
 import { stripRun } from './strip-run';
 import { stripsForCount } from './strips-for-count';
 import { wedgePitch } from './wedge-pitch';
@@ -73,10 +73,4 @@ function runOf(plan: Plan, letter: string, pieces: number): { needed: Fraction; 
     needed: upToEighth(stripRun(pieces, cutWide.exact, pitchIn)),
     perStrip: wedgesPerStrip(usableIn, cutWide.exact, pitchIn),
   };
-}
-
-/** The last strip is the emptiest: what is left of it after its pieces. */
-function lastStripLeft({ count, lengths, length }: PlanStrip, usable: Fraction): Fraction {
-  const before = (count - 1) * piecesPerStrip(usable, toFraction(length));
-  return usable.sub(toFraction(length).mul(Math.max(0, lengths - before)));
 }

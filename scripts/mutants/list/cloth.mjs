@@ -6,7 +6,7 @@ const CUTTING = group(
   [
     ['find-replacement', '.gte(height)', '.lte(height)'],
     ['find-replacement', 'left.gte(needed)', 'left.gt(usable)'],
-    ['find-replacement', '(count - 1) * piecesPerStrip', 'count * piecesPerStrip'],
+    ['last-strip-left', '(count - 1) * piecesPerStrip', 'count * piecesPerStrip'],
     ['find-replacement', 'along.lte(fabric.spare)', 'along.gt(fabric.spare)'],
     ['pieces-per-strip', '.floor()', '.ceil()'],
     ['plan-fabric', '.sub(needs)', '.add(needs)'],
