@@ -80,14 +80,13 @@ export async function tickAllChecks(page: Page): Promise<void> {
 
 /**
  * Opens a station on a new cutting visit: half an hour went by since the last. A browser that was
- * killed may not have written the last visit down; then this one is new anyway.
+ * killed may not have written its last visit down, so one is written here in any case.
  */
 export async function comeBackAfterHalfAnHour(page: Page, address: string): Promise<void> {
   await page.evaluate(() => {
     const kept = localStorage.getItem('matside.cuttingVisit');
-    if (kept === null) return;
-    const visit = JSON.parse(kept) as { lastSeenAtMs: number };
-    const before = { ...visit, lastSeenAtMs: visit.lastSeenAtMs - 31 * 60_000 };
+    const visit = JSON.parse(kept ?? '{"opened":"checked","adult":false}') as object;
+    const before = { ...visit, lastSeenAtMs: Date.now() - 31 * 60_000 };
     localStorage.setItem('matside.cuttingVisit', JSON.stringify(before));
   });
   await openAt(page, address);
